@@ -1,0 +1,46 @@
+package steelyard.harness.task;
+
+import java.util.List;
+import org.openjdk.jmh.infra.Blackhole;
+import steelyard.algorithms.Candidate;
+import steelyard.problems.Data;
+import steelyard.problems.Family;
+
+/**
+ * The binding of a task's candidates to its problems. Everything else in the harness works on this
+ * interface alone.
+ *
+ * @param <K> the task's interface
+ * @param <D> the kind of input
+ */
+public interface Task<K, D extends Data> {
+
+  /** Returns the short name, lower case letters, digits and hyphens. */
+  String id();
+
+  /** Returns one line that says what is computed. */
+  String description();
+
+  /** Returns the candidates; the first is the textbook one, to which times are compared. */
+  List<Candidate<K>> candidates();
+
+  /** Returns the families. */
+  List<Family<D>> families();
+
+  /** Returns an input made of these arrays, named and ordered as {@link Data#parts()} has them. */
+  D data(List<Data.Part> parts);
+
+  /** Applies a kernel to an input; the answer of a scalar task has one entry. */
+  double[] apply(K kernel, D data);
+
+  /** Applies a kernel to an input for its running time alone, and gives the answer to the sink. */
+  void time(K kernel, D data, Blackhole sink);
+
+  /**
+   * Returns what one call is divided by for a time per element, such as n; 1 where a call is the
+   * unit.
+   */
+  default int elements(D data) {
+    return 1;
+  }
+}
