@@ -44,7 +44,7 @@ public final class LinearSolvers {
                 "gauss-rook",
                 new GaussianElimination(Pivoting.ROOK),
                 "Gaussian elimination, a pivot that is largest in its row and its column",
-                "2n³/3 flops, between n² and n³/3 comparisons",
+                "2n³/3 flops, n² to n³/3 comparisons",
                 "Neal and Poole 1992; Foster 1997; " + ASNA + "section 9.1")
             .claiming(SolverBounds.rookPivoting()),
         candidate(
@@ -154,7 +154,7 @@ public final class LinearSolvers {
         candidate(
             "ejml-lu",
             Ejml.LU,
-            "partial pivoting",
+            "partial pivoting; what is singular may get an answer that is not finite",
             "2n³/3 flops",
             EJML + "LinearSolverFactory_DDRM.lu"),
         candidate(
@@ -165,6 +165,7 @@ public final class LinearSolvers {
             EJML + "LinearSolverFactory_DDRM.qr"));
   }
 
+  /** Names the task's interface where a call chain would infer the implementing class. */
   private static Candidate<LinearSolver> candidate(
       String id, LinearSolver solver, String description, String cost, String source) {
     return Candidate.of(id, solver, description, cost, source);

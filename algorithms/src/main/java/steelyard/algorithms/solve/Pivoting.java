@@ -3,6 +3,9 @@ package steelyard.algorithms.solve;
 /**
  * How Gaussian elimination chooses its pivots. Comparisons with NaN are false, so a NaN is never
  * preferred and no search can go round in circles.
+ *
+ * @see <a href="https://doi.org/10.1137/1.9780898718027">Higham, Accuracy and Stability of
+ *     Numerical Algorithms, 2nd ed., 2002, section 9.1</a>
  */
 enum Pivoting {
   /** Takes the diagonal entry as it comes. */
@@ -21,7 +24,10 @@ enum Pivoting {
     }
   },
 
-  /** Takes an entry of largest modulus in both its row and its column. */
+  /**
+   * Takes an entry of largest modulus in both its row and its column, found by turning from columns
+   * to rows and back for as long as the entry grows (Neal and Poole 1992).
+   */
   ROOK {
     @Override
     Position choose(double[][] a, int k) {

@@ -17,9 +17,9 @@ import steelyard.algorithms.Bound;
  *   <li>complete pivoting: √(n · 2 · 3^(1/2) ⋯ n^(1/(n−1))) (Wilkinson 1961).
  * </ul>
  *
- * Rounding can raise the computed growth by a factor 1 + O(nu). The theorem's n² has room for it:
- * it stands for the largest row sum of |L||U|, in units of the largest |uᵢⱼ|, which is at most
- * n(n+1)/2 for n rows.
+ * Rounding can raise the computed growth by a factor 1 + O(u) for fixed n. The theorem's n² has
+ * room for it: it stands for the largest row sum of |L||U|, in units of the largest |uᵢⱼ|, which is
+ * at most n(n+1)/2 for n rows.
  *
  * <p>For Cholesky |ΔA| ≤ γ₃ₙ₊₁ |R̂ᵀ||R̂| (Higham 2002, Theorem 10.4), and the squares in column i
  * of R̂ add up to at most aᵢᵢ/(1−γₙ₊₁) (same place, proof of Theorem 10.5; Demmel 1989). By
