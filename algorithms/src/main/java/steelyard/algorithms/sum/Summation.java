@@ -1,6 +1,13 @@
 package steelyard.algorithms.sum;
 
-/** Adds the terms of an array. */
+/**
+ * Adds the terms of an array.
+ *
+ * <p>All candidates agree where IEEE arithmetic decides the answer: terms with a NaN or with both
+ * infinities sum to NaN, terms with one of the infinities sum to that infinity. A method whose own
+ * arithmetic would turn an infinity into NaN gives the recursive sum then. The sign of a zero sum
+ * is not fixed.
+ */
 @FunctionalInterface
 public interface Summation {
   /**
