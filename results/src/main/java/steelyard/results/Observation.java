@@ -43,4 +43,12 @@ public record Observation(
    * @param held whether the observed error is within it
    */
   public record Claim(String limits, double bound, boolean held) {}
+
+  /**
+   * Says whether this row can be judged: its status is {@code ok} and both its forward error and
+   * its condition number are known.
+   */
+  public boolean isJudged() {
+    return status == Status.OK && forwardError.isPresent() && condition.isPresent();
+  }
 }

@@ -1,0 +1,30 @@
+package steelyard.results.verdict;
+
+import java.util.List;
+import steelyard.results.Grade;
+import steelyard.results.Observation;
+
+/**
+ * Every forward error is at most C(n) max(κ, 1) u. Where κ is infinite no forward error, not even
+ * an infinite one, is more than the condition number explains.
+ */
+record ForwardStableRule() implements VerdictRule {
+  @Override
+  public Grade grade() {
+    return Grade.FORWARD_STABLE;
+  }
+
+  @Override
+  public boolean holds(List<Observation> judged) {
+    return judged.stream().allMatch(ForwardStableRule::holds);
+  }
+
+  /** Says whether one judged observation is within the limit. */
+  static boolean holds(Observation o) {
+    double limit =
+        Allowances.c(o.size())
+            * Math.max(o.condition().orElseThrow(), 1)
+            * Allowances.unitRoundoff(o.precisionBits());
+    return o.forwardError().orElseThrow() <= limit;
+  }
+}
