@@ -10,6 +10,7 @@ import steelyard.problems.Reference;
 import steelyard.problems.ScalarJudge;
 import steelyard.problems.Trait;
 import steelyard.problems.exact.Dyadic;
+import steelyard.problems.exact.ErrorFree;
 import steelyard.problems.exact.ExactAccumulator;
 
 /**
@@ -22,8 +23,6 @@ import steelyard.problems.exact.ExactAccumulator;
  *     product, SIAM Journal on Scientific Computing 26 (2005)</a>
  */
 public final class DotProblem implements Problem<Vectors> {
-  private static final double LEAST_SAFE_PRODUCT = 0x1p-968;
-
   private final Vectors data;
   private final ScalarJudge judge;
   private final Set<String> traits;
@@ -54,7 +53,7 @@ public final class DotProblem implements Problem<Vectors> {
     boolean safe = true;
     for (int i = 0; i < x.length; i++) {
       largest = Math.max(largest, Math.max(Math.abs(x[i]), Math.abs(y[i])));
-      safe &= x[i] == 0 || y[i] == 0 || Math.abs(x[i] * y[i]) >= LEAST_SAFE_PRODUCT;
+      safe &= x[i] == 0 || y[i] == 0 || Math.abs(x[i] * y[i]) >= ErrorFree.LEAST_SAFE_PRODUCT;
     }
     Dyadic headroom = Dyadic.powerOfTwo(Trait.OVERFLOW_HEADROOM_EXPONENT);
     if (judge.scale().compareTo(headroom) < 0 && Dyadic.of(largest).compareTo(headroom) < 0) {

@@ -12,7 +12,7 @@ import steelyard.problems.exact.Dyadic;
  * whole range from 1 down to the inverse of the condition number, then contributions that each
  * cancel the exact partial sum down to the next of a row of falling levels. The last one is
  * computed here from the exact sums so far, so that the ratio is met up to one rounding, which
- * changes it by less than a factor of 1.2.
+ * changes it by less than a factor of 1.25.
  *
  * @see <a href="https://doi.org/10.1137/030601818">Ogita, Rump and Oishi, Accurate sum and dot
  *     product, SIAM Journal on Scientific Computing 26 (2005), Algorithm 6.1</a>
@@ -39,8 +39,7 @@ public final class Cancellation {
     Dyadic absoluteSum();
   }
 
-  // One contribution of 53 bits can cancel this many bits and still leave the rest accurate to an
-  // eighth.
+  // A contribution of 53 bits can cancel this many and still leave the rest accurate to a fifth.
   private static final int BITS_PER_CONTRIBUTION = 50;
 
   // With this many levels the contributions already have every order of magnitude, and each level
@@ -79,7 +78,7 @@ public final class Cancellation {
     int needed = Math.max(1, (int) Math.ceil(bits / BITS_PER_CONTRIBUTION));
     if (needed > count - 1) {
       throw new UnreachableException(
-          "%d terms cancel at most to a condition number of 2^%d, but more is wanted"
+          "%d terms cannot cancel by a factor beyond 2^%d; a larger size is wanted"
               .formatted(count, BITS_PER_CONTRIBUTION * (count - 1)));
     }
     int levels = Math.max(needed, Math.min(count / 2, usefulLevels()));
@@ -110,13 +109,13 @@ public final class Cancellation {
     }
   }
 
-  // With sum p and absolute sum q so far and p > 0, a contribution x makes the ratio
-  // (q + |x|) / (p + x) whose solution x is positive or negative as q is above or below ratio * p.
+  // With sum p > 0 and absolute sum q so far, a contribution x makes the ratio (q + |x|) / (p + x).
+  // It is as wanted for x = excess / (ratio - 1) or, where the excess q - ratio * p is negative,
+  // for x = excess / (ratio + 1).
   private void enterLast() {
     Dyadic sum = ledger.sum();
     boolean negative = sum.signum() < 0;
-    Dyadic excess =
-        ledger.absoluteSum().subtract(Dyadic.of(ratio).multiply(sum.abs())); // q - ratio * p
+    Dyadic excess = ledger.absoluteSum().subtract(Dyadic.of(ratio).multiply(sum.abs()));
     Dyadic numerator;
     Dyadic denominator;
     if (ratio == 1) {

@@ -5,12 +5,12 @@ import static org.assertj.core.api.Assertions.within;
 
 import java.math.MathContext;
 import java.util.Arrays;
-import java.util.OptionalDouble;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
 import steelyard.problems.ControlledCondition;
 import steelyard.problems.Family;
+import steelyard.problems.Judgement.Standing;
 import steelyard.problems.Problem;
 import steelyard.problems.ProblemId;
 import steelyard.problems.Trait;
@@ -116,20 +116,20 @@ class SumFamiliesTest {
     return sum + lost;
   }
 
-  @ParameterizedTest
-  @CsvSource({"3", "4", "5", "10", "101", "1000"})
-  void partialSumsOverflowAlthoughTheSumDoesNot(int size) {
-    Problem<Terms> problem = problem("overflow/n" + size + "/r1");
-    double partial = 0;
-    for (double term : problem.data().values()) {
-      partial += term;
+  @Test
+  void partialSumsOverflowAlthoughTheSumDoesNot() {
+    for (int size = 3; size <= 100; size++) {
+      Problem<Terms> problem = problem("overflow/n" + size + "/r1");
+      double partial = 0;
+      for (double term : problem.data().values()) {
+        partial += term;
+      }
+      assertThat(partial).isInfinite();
+      assertThat(problem.judge(new double[] {partial}).standing()).isEqualTo(Standing.INFINITE);
+      double nearest = problem.reference().answer(MathContext.UNLIMITED).get(0).doubleValue();
+      assertThat(problem.judge(new double[] {nearest}).forwardError()).isLessThan(0x1p-53);
+      assertThat(problem.traits()).doesNotContain(Trait.NO_INTERMEDIATE_OVERFLOW);
     }
-    assertThat(partial).isInfinite();
-    assertThat(problem.judge(new double[] {partial}).forwardError()).isNaN();
-    double nearest = problem.reference().answer(MathContext.UNLIMITED).get(0).doubleValue();
-    assertThat(nearest).isFinite();
-    assertThat(problem.judge(new double[] {nearest}).forwardError()).isLessThan(0x1p-53);
-    assertThat(problem.traits()).doesNotContain(Trait.NO_INTERMEDIATE_OVERFLOW);
   }
 
   @Test
@@ -146,20 +146,18 @@ class SumFamiliesTest {
         .doesNotContain(Trait.SAME_SIGN);
   }
 
-  @ParameterizedTest
-  @CsvSource({"2", "3", "10", "1000"})
-  void ledgerIsOfDecimalsWithATinyBalance(int size) {
-    ProblemId id = new ProblemId("sum", "depot-ledger", OptionalDouble.empty(), size, 1, 1);
-    double[] tickets =
-        family("depot-ledger").generate(id.request(), id.randomness()).data().values();
-    long balanceKg = 0;
-    for (double ticket : tickets) {
-      long kg = Math.round(ticket * 1000);
-      assertThat(kg / 1000.0).isEqualTo(ticket);
-      assertThat(kg % 20).isZero();
-      assertThat(Math.abs(ticket)).isLessThan(100);
-      balanceKg += kg;
+  @Test
+  void ledgerIsOfDecimalsWithATinyBalance() {
+    for (int size = 2; size <= 200; size++) {
+      long balanceKg = 0;
+      for (double ticket : problem("depot-ledger/n" + size + "/r1").data().values()) {
+        long kg = Math.round(ticket * 1000);
+        assertThat(kg / 1000.0).isEqualTo(ticket);
+        assertThat(kg % 20).isZero();
+        assertThat(Math.abs(ticket)).isLessThan(100);
+        balanceKg += kg;
+      }
+      assertThat(balanceKg).isBetween(20L, 200L);
     }
-    assertThat(balanceKg).isBetween(20L, 200L);
   }
 }
