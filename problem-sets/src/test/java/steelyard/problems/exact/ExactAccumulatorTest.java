@@ -1,0 +1,115 @@
+package steelyard.problems.exact;
+
+import static org.assertj.core.api.Assertions.assertThat;
+import static org.assertj.core.api.Assertions.assertThatThrownBy;
+
+import java.math.BigDecimal;
+import org.junit.jupiter.api.Test;
+
+/** The accumulator against BigDecimal, which adds and multiplies doubles exactly. */
+class ExactAccumulatorTest {
+
+  @Test
+  void sumsAreExact() {
+    RandomDoubles doubles = new RandomDoubles(1);
+    for (int i = 0; i < 300; i++) {
+      double[] terms = doubles.array(1 + doubles.below(40));
+      BigDecimal sum = BigDecimal.ZERO;
+      BigDecimal absolute = BigDecimal.ZERO;
+      for (double term : terms) {
+        sum = sum.add(new BigDecimal(term));
+        absolute = absolute.add(new BigDecimal(term).abs());
+      }
+      assertThat(ExactAccumulator.sum(terms).toBigDecimal()).isEqualByComparingTo(sum);
+      assertThat(ExactAccumulator.absoluteSum(terms).toBigDecimal()).isEqualByComparingTo(absolute);
+    }
+  }
+
+  @Test
+  void dotProductsAreExact() {
+    RandomDoubles doubles = new RandomDoubles(2);
+    for (int i = 0; i < 300; i++) {
+      double[] x = doubles.array(1 + doubles.below(20));
+      double[] y = doubles.array(x.length);
+      BigDecimal sum = BigDecimal.ZERO;
+      BigDecimal absolute = BigDecimal.ZERO;
+      for (int j = 0; j < x.length; j++) {
+        BigDecimal product = new BigDecimal(x[j]).multiply(new BigDecimal(y[j]));
+        sum = sum.add(product);
+        absolute = absolute.add(product.abs());
+      }
+      assertThat(ExactAccumulator.dot(x, y).toBigDecimal()).isEqualByComparingTo(sum);
+      assertThat(ExactAccumulator.absoluteDot(x, y).toBigDecimal()).isEqualByComparingTo(absolute);
+    }
+  }
+
+  @Test
+  void holdsTheSmallestAndTheLargestProducts() {
+    ExactAccumulator accumulator = new ExactAccumulator();
+    accumulator.addProduct(Double.MAX_VALUE, Double.MAX_VALUE);
+    accumulator.addProduct(Double.MIN_VALUE, -Double.MIN_VALUE);
+    BigDecimal large = new BigDecimal(Double.MAX_VALUE).pow(2);
+    BigDecimal small = new BigDecimal(Double.MIN_VALUE).pow(2);
+    assertThat(accumulator.value().toBigDecimal()).isEqualByComparingTo(large.subtract(small));
+    accumulator.addProduct(-Double.MAX_VALUE, Double.MAX_VALUE);
+    assertThat(accumulator.value()).isEqualTo(Dyadic.powerOfTwo(-2148).negate());
+    assertThat(accumulator.round()).isEqualTo(-0.0);
+    accumulator.reset();
+    assertThat(accumulator.value()).isEqualTo(Dyadic.ZERO);
+  }
+
+  /**
+   * Far more terms of one sign and size than chunks could gather without passing carries, at every
+   * place that a significand can take within a chunk.
+   */
+  @Test
+  void passesCarriesInTime() {
+    Dyadic count = Dyadic.of(10_007);
+    for (int place = 0; place < 32; place++) {
+      double term = Math.scalb(place % 2 == 0 ? -0x1.fffffffffffffp0 : 0x1.fffffffffffffp0, place);
+      double unsafe = Math.scalb(term, -500);
+      ExactAccumulator sums = new ExactAccumulator();
+      ExactAccumulator products = new ExactAccumulator();
+      ExactAccumulator unsafeProducts = new ExactAccumulator();
+      for (int i = 0; i < 10_007; i++) {
+        sums.add(term);
+        products.addProduct(term, 0x1.fffffffffffffp0);
+        unsafeProducts.addProduct(unsafe, 0x1.fffffffffffffp-520);
+      }
+      Dyadic value = Dyadic.of(term);
+      Dyadic product = value.multiply(Dyadic.of(0x1.fffffffffffffp0));
+      assertThat(sums.value()).isEqualTo(value.multiply(count));
+      assertThat(products.value()).isEqualTo(product.multiply(count));
+      assertThat(unsafeProducts.value()).isEqualTo(product.multiply(count).scalb(-1020));
+    }
+  }
+
+  /** Doubling 2^30 ones into themselves reaches 2^62 terms without adding them one by one. */
+  @Test
+  void takesAccumulatorsAsTerms() {
+    ExactAccumulator accumulator = new ExactAccumulator();
+    accumulator.add(Double.MAX_VALUE);
+    accumulator.addProduct(Double.MAX_VALUE, Double.MAX_VALUE);
+    accumulator.add(-Double.MIN_VALUE);
+    Dyadic once = accumulator.value();
+    for (int i = 0; i < 62; i++) {
+      ExactAccumulator copy = new ExactAccumulator();
+      copy.add(accumulator);
+      accumulator.add(copy);
+    }
+    assertThat(accumulator.value()).isEqualTo(once.scalb(62));
+  }
+
+  @Test
+  void refusesWhatIsNotFinite() {
+    ExactAccumulator accumulator = new ExactAccumulator();
+    String sentence = "a finite double is wanted, but it is infinite or NaN";
+    assertThatThrownBy(() -> accumulator.add(Double.NaN)).hasMessage(sentence);
+    assertThatThrownBy(() -> accumulator.add(Double.NEGATIVE_INFINITY)).hasMessage(sentence);
+    assertThatThrownBy(() -> accumulator.addProduct(Double.POSITIVE_INFINITY, 0))
+        .isInstanceOf(IllegalArgumentException.class)
+        .hasMessage(sentence);
+    assertThatThrownBy(() -> ExactAccumulator.dot(new double[2], new double[3]))
+        .hasMessage("two vectors of the same length are wanted, but they have 2 and 3 entries");
+  }
+}
