@@ -31,7 +31,7 @@ final class DoubleDoubleInverse implements ApproximateInverse {
   private final double[] high;
   private final double[] low;
 
-  private DoubleDoubleInverse(ScaledSystem system, double[] high, double[] low) {
+  DoubleDoubleInverse(ScaledSystem system, double[] high, double[] low) {
     size = system.size;
     matrix = system.matrix;
     this.high = high;

@@ -21,7 +21,7 @@ final class DoubleInverse implements ApproximateInverse {
   private final double[] matrix;
   private final double[] inverse;
 
-  private DoubleInverse(ScaledSystem system, double[] inverse) {
+  DoubleInverse(ScaledSystem system, double[] inverse) {
     size = system.size;
     matrix = system.matrix;
     this.inverse = inverse;

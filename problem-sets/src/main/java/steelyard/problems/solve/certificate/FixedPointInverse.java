@@ -20,7 +20,7 @@ final class FixedPointInverse implements ApproximateInverse {
   private final IntegerMatrix matrix;
   private final BigInteger[] inverse;
 
-  private FixedPointInverse(int fractionBits, ScaledSystem system, BigInteger[] inverse) {
+  FixedPointInverse(int fractionBits, ScaledSystem system, BigInteger[] inverse) {
     size = system.size;
     this.fractionBits = fractionBits;
     matrix = IntegerMatrix.of(system.size, system.matrix);
