@@ -26,6 +26,29 @@ public interface Family<D extends Data> {
   Problem<D> generate(Request request, UniformRandomProvider random);
 
   /**
+   * Checks that a request lies inside {@link #reach()}, which generators do first.
+   *
+   * @throws UnreachableException if it does not
+   */
+  default void requireReachable(Request request) {
+    Reach reach = reach();
+    if (request.size() < reach.minSize() || request.size() > reach.maxSize()) {
+      throw new UnreachableException(
+          "family '%s' makes sizes from %d to %d, but size %d is wanted"
+              .formatted(profile().id(), reach.minSize(), reach.maxSize(), request.size()));
+    }
+    double condition = request.condition();
+    if (!(condition >= 1 && condition <= reach.maxCondition())) {
+      throw new UnreachableException(
+          "family '%s' makes condition numbers from 1 to %s, but %s is wanted"
+              .formatted(
+                  profile().id(),
+                  ConditionText.of(reach.maxCondition()),
+                  ConditionText.of(condition)));
+    }
+  }
+
+  /**
    * What a family is, for readers.
    *
    * @param id short name, lower case letters, digits and hyphens; unique within the task

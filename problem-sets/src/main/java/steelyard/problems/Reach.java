@@ -5,7 +5,8 @@ package steelyard.problems;
  *
  * @param controlled whether the target condition number is a knob of the family; if not, the
  *     condition number follows from the size and the data
- * @param maxCondition the largest target; the smallest is 1
+ * @param maxCondition the largest target; the smallest is 1. A small size may allow less, which the
+ *     family then says when asked
  * @param minSize the smallest size, at least 1
  * @param maxSize the largest size
  */

@@ -77,13 +77,14 @@ public record Dyadic(BigInteger significand, int exponent) implements Comparable
     if (b.signum() == 0) {
       throw new ArithmeticException("the divisor is zero");
     }
-    int shift =
-        Math.max(
-            0, QUOTIENT_BITS + b.significand.bitLength() - a.significand.abs().bitLength() + 1);
-    BigInteger[] parts =
-        a.significand.abs().shiftLeft(shift).divideAndRemainder(b.significand.abs());
+    BigInteger dividend = a.significand.abs();
+    BigInteger divisor = b.significand.abs();
+    // A longer dividend is cut: its lower bits do not reach the quotient's whole part.
+    int shift = QUOTIENT_BITS + 1 + divisor.bitLength() - dividend.bitLength();
+    BigInteger[] parts = dividend.shiftLeft(shift).divideAndRemainder(divisor);
+    boolean isCut = shift < 0 && dividend.getLowestSetBit() < -shift;
     BigInteger developed = parts[0].shiftLeft(1);
-    if (parts[1].signum() != 0) {
+    if (isCut || parts[1].signum() != 0) {
       developed = developed.setBit(0);
     }
     if (a.signum() * b.signum() < 0) {

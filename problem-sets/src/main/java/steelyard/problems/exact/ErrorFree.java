@@ -9,9 +9,12 @@ package steelyard.problems.exact;
  */
 public final class ErrorFree {
 
-  // The lowest bit of a product of normal doubles weighs at least 2^-105 of its leading bit's upper
-  // neighbour; from here on that bit is representable.
-  private static final double LEAST_SAFE_PRODUCT = 0x1p-968;
+  /**
+   * The least magnitude of a computed product, 2^-968, from which on its rounding error is
+   * certainly a double: a product is less than 2^106 times its lowest bit, which is then at least
+   * 2^-1074.
+   */
+  public static final double LEAST_SAFE_PRODUCT = 0x1p-968;
 
   private ErrorFree() {}
 

@@ -1,0 +1,76 @@
+package steelyard.problems.dot;
+
+import java.util.Arrays;
+import org.apache.commons.rng.UniformRandomProvider;
+import steelyard.problems.Family;
+import steelyard.problems.exact.Dyadic;
+import steelyard.problems.exact.ExactAccumulator;
+import steelyard.problems.generate.Cancellation;
+import steelyard.problems.generate.Draw;
+
+/**
+ * Vectors whose products have every order of magnitude and cancel to a wanted condition number, in
+ * random order. The roundings of single products already outweigh the result.
+ */
+final class CancellingVectors implements Cancellation.Ledger {
+  // No condition number is below 2, so a smaller target asks for products that do not cancel.
+  private static final double LEAST_RATIO = 1;
+
+  private final ExactAccumulator sum = new ExactAccumulator();
+  private final UniformRandomProvider random;
+  private final double[] x;
+  private final double[] y;
+  private int count;
+
+  private CancellingVectors(int size, UniformRandomProvider random) {
+    this.random = random;
+    x = new double[size];
+    y = new double[size];
+  }
+
+  static Vectors generate(Family.Request request, UniformRandomProvider random) {
+    CancellingVectors ledger = new CancellingVectors(request.size(), random);
+    double ratio = Math.max(LEAST_RATIO, request.condition() / 2);
+    Cancellation.enter(ratio, request.size(), random, ledger);
+    Draw.shuffle(random, ledger.x, ledger.y);
+    return new Vectors(ledger.x, ledger.y);
+  }
+
+  @Override
+  public void enter(Dyadic numerator, Dyadic denominator) {
+    double factor = factor(leadingExponent(numerator) - leadingExponent(denominator));
+    enter(factor, Dyadic.quotient(numerator, denominator.multiply(Dyadic.of(factor))));
+  }
+
+  @Override
+  public void enter(double product) {
+    double factor = factor(Math.getExponent(product));
+    enter(factor, product / factor);
+  }
+
+  private void enter(double factor, double partner) {
+    x[count] = factor;
+    y[count] = partner;
+    sum.addProduct(factor, partner);
+    count++;
+  }
+
+  // The magnitude of the product is shared evenly between a random factor and its partner.
+  private double factor(int exponent) {
+    return Draw.signed(random, Math.floorDiv(exponent, 2));
+  }
+
+  private static int leadingExponent(Dyadic number) {
+    return number.exponent() + number.significand().bitLength();
+  }
+
+  @Override
+  public Dyadic sum() {
+    return sum.value();
+  }
+
+  @Override
+  public Dyadic absoluteSum() {
+    return ExactAccumulator.absoluteDot(Arrays.copyOf(x, count), Arrays.copyOf(y, count));
+  }
+}

@@ -1,0 +1,90 @@
+package steelyard.problems.sum;
+
+import java.util.Set;
+import java.util.TreeSet;
+import steelyard.problems.Condition;
+import steelyard.problems.ExactReference;
+import steelyard.problems.Judgement;
+import steelyard.problems.Problem;
+import steelyard.problems.Reference;
+import steelyard.problems.ScalarJudge;
+import steelyard.problems.Trait;
+import steelyard.problems.exact.Dyadic;
+import steelyard.problems.exact.ExactAccumulator;
+
+/**
+ * A sum s of stored terms x. The reference is exact; the condition number is &Sigma;|x| / |s| and
+ * the backward error |&#349; - s| / &Sigma;|x|, the least relative change of the terms that makes
+ * an answer &#349; exact. How they are rounded is said at {@link ScalarJudge}.
+ *
+ * @see <a href="https://doi.org/10.1137/1.9780898718027">Higham, Accuracy and Stability of
+ *     Numerical Algorithms, 2nd ed., 2002, Chapter 4</a>
+ */
+public final class SumProblem implements Problem<Terms> {
+  private final Terms data;
+  private final ScalarJudge judge;
+  private final Set<String> traits;
+
+  /**
+   * Makes the problem of adding these terms.
+   *
+   * @throws IllegalArgumentException if there are none, or one is infinite or NaN
+   */
+  public SumProblem(Terms data) {
+    double[] terms = data.values();
+    if (terms.length == 0) {
+      throw new IllegalArgumentException("a sum needs at least one term, but there are none");
+    }
+    this.data = data;
+    judge = new ScalarJudge(ExactAccumulator.sum(terms), ExactAccumulator.absoluteSum(terms));
+    traits = verifiedTraits(terms, judge);
+  }
+
+  private static Set<String> verifiedTraits(double[] terms, ScalarJudge judge) {
+    Set<String> verified = new TreeSet<>();
+    if (judge.scale().compareTo(Dyadic.powerOfTwo(Trait.OVERFLOW_HEADROOM_EXPONENT)) < 0) {
+      verified.add(Trait.NO_INTERMEDIATE_OVERFLOW);
+    }
+    if (judge.exact().abs().equals(judge.scale())) {
+      verified.add(Trait.SAME_SIGN);
+    }
+    boolean normal = true;
+    for (double term : terms) {
+      normal &= term == 0 || Math.abs(term) >= Double.MIN_NORMAL;
+    }
+    if (normal) {
+      verified.add(Trait.NO_UNDERFLOW);
+    }
+    return Set.copyOf(verified);
+  }
+
+  @Override
+  public Terms data() {
+    return data;
+  }
+
+  @Override
+  public int size() {
+    return data.values().length;
+  }
+
+  @Override
+  public Condition condition() {
+    return judge.condition();
+  }
+
+  @Override
+  public Reference reference() {
+    return new ExactReference(judge.exact());
+  }
+
+  @Override
+  public Set<String> traits() {
+    return traits;
+  }
+
+  @Override
+  public Judgement judge(double[] answer) {
+    return judge.judge(answer);
+  }
+}

@@ -1,0 +1,96 @@
+package steelyard.problems;
+
+import static org.assertj.core.api.Assertions.assertThat;
+
+import java.math.BigDecimal;
+import java.math.MathContext;
+import java.util.SplittableRandom;
+import org.apfloat.Apfloat;
+import org.apfloat.ApfloatMath;
+
+/**
+ * Holds a scalar problem's condition number and errors against two independent paths: exact decimal
+ * fractions, multiplied out so that nothing is rounded, and division by apfloat with 60 digits.
+ */
+public final class IndependentErrors {
+  private static final int DIGITS = 60;
+
+  private IndependentErrors() {}
+
+  /**
+   * Checks a problem.
+   *
+   * @param exact its exact answer
+   * @param scale what its backward error is relative to
+   */
+  public static void check(Problem<?> problem, BigDecimal exact, BigDecimal scale) {
+    assertThat(problem.reference().answer(MathContext.UNLIMITED).get(0))
+        .isEqualByComparingTo(exact);
+    if (exact.signum() == 0) {
+      assertThat(problem.condition().kappa()).isInfinite();
+    } else {
+      assertRatio(problem.condition().kappa(), scale, exact.abs());
+    }
+    double nearest = Double.parseDouble(exact.toString());
+    SplittableRandom random = new SplittableRandom(exact.hashCode());
+    double[] answers = {
+      nearest,
+      Math.nextUp(nearest),
+      Math.nextDown(nearest),
+      -nearest,
+      0,
+      nearest * (1 + random.nextDouble()),
+      Math.scalb(random.nextDouble(), random.nextInt(2000) - 1050),
+      nearest + Math.ulp(scale.doubleValue()),
+    };
+    for (double answer : answers) {
+      if (Double.isFinite(answer)) {
+        checkAnswer(problem.judge(new double[] {answer}), answer, exact, scale);
+      }
+    }
+  }
+
+  private static void checkAnswer(
+      Judgement judgement, double answer, BigDecimal exact, BigDecimal scale) {
+    BigDecimal error = new BigDecimal(answer).subtract(exact).abs();
+    assertThat(judgement.standing()).isEqualTo(Judgement.Standing.OK);
+    assertRatio(judgement.backwardError(), error, scale);
+    assertRatio(judgement.forwardError(), error, exact.abs());
+    BigDecimal up = new BigDecimal(Math.ulp(answer));
+    boolean isNearest = answer == Double.parseDouble(exact.toString());
+    // Beyond the largest double there is no telling by distance.
+    boolean isFar = error.compareTo(up) > 0 && Math.abs(answer) < Double.MAX_VALUE;
+    if (isNearest || isFar) {
+      assertThat(judgement.rounding())
+          .isEqualTo(isNearest ? Judgement.Rounding.NEAREST : Judgement.Rounding.OTHER);
+    }
+  }
+
+  // The ratio is the double nearest to numerator / denominator, or the least double instead of 0.
+  private static void assertRatio(double ratio, BigDecimal numerator, BigDecimal denominator) {
+    if (denominator.signum() == 0) {
+      assertThat(ratio).isEqualTo(numerator.signum() == 0 ? 0 : Double.POSITIVE_INFINITY);
+    } else if (Double.isInfinite(ratio)) {
+      assertThat(numerator).isGreaterThan(denominator.multiply(new BigDecimal(Double.MAX_VALUE)));
+    } else if (ratio == Double.MIN_VALUE) {
+      assertThat(numerator).isLessThan(denominator.multiply(new BigDecimal(2 * ratio)));
+      assertThat(numerator.signum()).isPositive();
+    } else {
+      BigDecimal halfUlp = new BigDecimal(Math.ulp(ratio)).divide(BigDecimal.valueOf(2));
+      BigDecimal off = new BigDecimal(ratio).multiply(denominator).subtract(numerator).abs();
+      assertThat(off).isLessThanOrEqualTo(halfUlp.multiply(denominator));
+      assertWithApfloat(ratio, numerator, denominator);
+    }
+  }
+
+  private static void assertWithApfloat(
+      double ratio, BigDecimal numerator, BigDecimal denominator) {
+    Apfloat quotient = new Apfloat(numerator, DIGITS).divide(new Apfloat(denominator, DIGITS));
+    Apfloat off = ApfloatMath.abs(new Apfloat(new BigDecimal(ratio), DIGITS).subtract(quotient));
+    // Half an ulp, and what is left of 60 digits.
+    Apfloat allowed =
+        new Apfloat(new BigDecimal(Math.ulp(ratio)), DIGITS)
+            .multiply(new Apfloat("0.5000001", DIGITS));
+    assertThat(off.compareTo(allowed)).as("%s", ratio).isLessThanOrEqualTo(0);
+  }
+}
