@@ -5,6 +5,7 @@ import java.util.List;
 import org.apache.commons.rng.UniformRandomProvider;
 import steelyard.problems.Family.Profile;
 import steelyard.problems.Reach;
+import steelyard.problems.generate.Draw;
 
 /**
  * Matrices of a fixed form, whose condition number follows from their size. The right-hand side is
@@ -161,8 +162,8 @@ final class ClassicalFamilies {
       lower[i][i] = 1;
       upper[i][i] = 1;
       for (int j = 0; j < i; j++) {
-        lower[i][j] = random.nextInt(3) - 1;
-        upper[j][i] = random.nextInt(3) - 1;
+        lower[i][j] = Draw.between(random, -1, 1);
+        upper[j][i] = Draw.between(random, -1, 1);
       }
     }
     double[][] a = new double[n][n];

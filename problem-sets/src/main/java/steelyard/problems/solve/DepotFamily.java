@@ -4,6 +4,7 @@ import org.apache.commons.rng.UniformRandomProvider;
 import steelyard.problems.Family.Profile;
 import steelyard.problems.Family.Request;
 import steelyard.problems.Reach;
+import steelyard.problems.generate.Draw;
 
 /**
  * The calibration of the load cells under a grain silo, an invented example. Cell i answers a load
@@ -25,7 +26,7 @@ final class DepotFamily {
             "an everyday system of integers with an exact integer solution (invented data)",
             "the cross-talk between neighbouring load cells",
             "own construction: invented calibration of a silo's load cells by reference weights, on"
-                + " the matrix c^|i-j| of Kac, Murdock and Szegö (1953)"),
+                + " the matrix of Kac, Murdock and Szegö (1953)"),
         Reach.upTo(LARGEST_CONDITION, 2, 64),
         DepotFamily::make);
   }
@@ -35,8 +36,8 @@ final class DepotFamily {
     double[] gains = new double[n];
     double[] weights = new double[n];
     for (int i = 0; i < n; i++) {
-      gains[i] = (980 + random.nextInt(41)) / 1000.0;
-      weights[i] = 20 + random.nextInt(481);
+      gains[i] = Draw.between(random, 980, 1020) / 1000.0;
+      weights[i] = Draw.between(random, 20, 500);
     }
     return Calibration.nearest(
         request.condition(),

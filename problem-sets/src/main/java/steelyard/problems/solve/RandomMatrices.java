@@ -2,6 +2,7 @@ package steelyard.problems.solve;
 
 import org.apache.commons.rng.UniformRandomProvider;
 import steelyard.problems.exact.ExactAccumulator;
+import steelyard.problems.generate.Draw;
 
 /** Random matrices and vectors from which families are built. */
 final class RandomMatrices {
@@ -90,8 +91,7 @@ final class RandomMatrices {
   static double[] ofOrderOne(int n, UniformRandomProvider random) {
     double[] x = new double[n];
     for (int i = 0; i < n; i++) {
-      double magnitude = 0.5 + 0.5 * random.nextDouble();
-      x[i] = random.nextBoolean() ? magnitude : -magnitude;
+      x[i] = Draw.signed(random, 0);
     }
     return x;
   }

@@ -4,7 +4,6 @@ import org.apache.commons.rng.UniformRandomProvider;
 import steelyard.problems.Family;
 import steelyard.problems.Problem;
 import steelyard.problems.Reach;
-import steelyard.problems.UnreachableException;
 
 /**
  * A family of linear systems: what it is, and the generator of its systems.
@@ -25,28 +24,7 @@ record SystemFamily(Profile profile, Reach reach, Generator generator)
 
   @Override
   public Problem<LinearSystem> generate(Request request, UniformRandomProvider random) {
-    requireWithinReach(request);
+    requireReachable(request);
     return SystemProblem.of(generator.make(request, random));
-  }
-
-  private void requireWithinReach(Request request) {
-    if (request.size() < reach.minSize() || request.size() > reach.maxSize()) {
-      throw new UnreachableException(
-          profile.id()
-              + " makes systems of size "
-              + reach.minSize()
-              + " to "
-              + reach.maxSize()
-              + ", not "
-              + request.size());
-    }
-    if (!(request.condition() >= 1 && request.condition() <= reach.maxCondition())) {
-      throw new UnreachableException(
-          profile.id()
-              + " makes condition numbers from 1 to "
-              + Scientific.of(reach.maxCondition())
-              + ", not "
-              + Scientific.of(request.condition()));
-    }
   }
 }

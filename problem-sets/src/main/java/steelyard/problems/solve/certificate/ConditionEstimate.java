@@ -64,6 +64,7 @@ public final class ConditionEstimate {
       xNorm = Math.max(xNorm, Math.scalb(Math.abs(x[i]), system.columnShift[i]));
       bNorm = Math.max(bNorm, Math.scalb(Math.abs(system.rightHandSide[i]), -system.rowShift[i]));
     }
-    return inverseNorm * (matrixNorm + bNorm / xNorm);
+    double kappa = inverseNorm * (matrixNorm + bNorm / xNorm);
+    return kappa > 0 ? kappa : Double.POSITIVE_INFINITY;
   }
 }

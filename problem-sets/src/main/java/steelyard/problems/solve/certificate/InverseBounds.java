@@ -29,7 +29,7 @@ import java.util.Arrays;
  * all.
  *
  * @see "S. M. Rump, Verification methods: rigorous results using floating-point arithmetic, Acta
- *     Numerica 19 (2010), section 10, for the use of ||I - R A|| &lt; 1"
+ *     Numerica 19 (2010), 287-449, for the use of ||I - R A|| &lt; 1"
  */
 final class InverseBounds {
   private final int size;

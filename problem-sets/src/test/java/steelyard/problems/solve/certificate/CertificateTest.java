@@ -162,6 +162,30 @@ class CertificateTest {
         .hasMessageContaining("powers of two");
   }
 
+  // The unit upper triangular matrix with -c above the diagonal has an inverse of norm (c+1)^(n-1)
+  // (Higham, Accuracy and Stability of Numerical Algorithms, 2nd ed. (2002), section 8.3).
+  @Test
+  void conditionNumbersUpTo1e234AreCertifiedAndBeyondTheRangeOfDoubleRefused() {
+    for (int n : new int[] {4, 10, 20, 40}) {
+      double[][] a = triangular(n, 0x1p20 - 1);
+      CertifiedSolution solution = CertifiedSolver.solve(a, new double[n]);
+      assertThat(solution.inverseNorm().contains(Math.scalb(1.0, 20 * (n - 1)))).isTrue();
+      assertThat(solution.inverseNorm().isWithin(0.01)).isTrue();
+    }
+    assertThatThrownBy(() -> CertifiedSolver.solve(triangular(60, 0x1p20 - 1), new double[60]))
+        .isInstanceOf(UncertifiedException.class)
+        .hasMessageContaining("1024 fraction bits");
+  }
+
+  private static double[][] triangular(int n, double c) {
+    double[][] a = new double[n][n];
+    for (int i = 0; i < n; i++) {
+      Arrays.fill(a[i], i + 1, n, -c);
+      a[i][i] = 1;
+    }
+    return a;
+  }
+
   private double[][] scaledRows() {
     double[][] rows = new double[3][];
     for (int i = 0; i < 3; i++) {
