@@ -11,6 +11,7 @@ import java.util.List;
 import java.util.Map;
 import org.junit.jupiter.api.Test;
 import steelyard.problems.dot.DotFamilies;
+import steelyard.problems.solve.SystemFamilies;
 import steelyard.problems.sum.SumFamilies;
 
 /** Holds the tables of the module's README to the catalogues of the families. */
@@ -20,6 +21,7 @@ class ReadmeTest {
     Map<String, List<? extends Family<?>>> catalogues = new LinkedHashMap<>();
     catalogues.put("sum", SumFamilies.all());
     catalogues.put("dot", DotFamilies.all());
+    catalogues.put("solve", SystemFamilies.all());
     return catalogues;
   }
 

@@ -1,0 +1,59 @@
+package steelyard.problems.solve.certificate;
+
+import java.util.Arrays;
+import steelyard.problems.exact.Dyadic;
+import steelyard.problems.exact.ExactAccumulator;
+
+/** The residual b - A x̃ of a scaled system, exactly, one accumulator per row. */
+final class Residual {
+  private Residual() {}
+
+  /** Returns the residual of x̃ = 0. */
+  static ExactAccumulator[] start(ScaledSystem system) {
+    ExactAccumulator[] residual = new ExactAccumulator[system.size];
+    for (int i = 0; i < system.size; i++) {
+      residual[i] = new ExactAccumulator();
+      residual[i].add(system.rightHandSide[i]);
+    }
+    return residual;
+  }
+
+  /** Takes into account that a vector was added to x̃. */
+  static void subtract(ScaledSystem system, ExactAccumulator[] residual, double[] added) {
+    int n = system.size;
+    for (int i = 0; i < n; i++) {
+      for (int j = 0; j < n; j++) {
+        double entry = system.matrix[i * n + j];
+        if (entry != 0 && added[j] != 0) {
+          residual[i].addProduct(-entry, added[j]);
+        }
+      }
+    }
+  }
+
+  /** Returns the numbers that the accumulators hold. */
+  static Dyadic[] values(ExactAccumulator[] accumulators) {
+    return Arrays.stream(accumulators).map(ExactAccumulator::value).toArray(Dyadic[]::new);
+  }
+
+  /** Returns whether x̃ solves the system exactly. */
+  static boolean isZero(ScaledSystem system, Dyadic[] x) {
+    ExactAccumulator[] residual = start(system);
+    Dyadic[] rest = x.clone();
+    boolean left = true;
+    while (left) {
+      double[] part = new double[rest.length];
+      left = false;
+      for (int i = 0; i < part.length; i++) {
+        part[i] = rest[i].doubleValue();
+        if (!Double.isFinite(part[i]) || (part[i] == 0 && rest[i].signum() != 0)) {
+          return false;
+        }
+        rest[i] = rest[i].subtract(Dyadic.of(part[i]));
+        left |= rest[i].signum() != 0;
+      }
+      subtract(system, residual, part);
+    }
+    return Arrays.stream(residual).allMatch(r -> r.value().signum() == 0);
+  }
+}
