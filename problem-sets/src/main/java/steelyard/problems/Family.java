@@ -38,12 +38,14 @@ public interface Family<D extends Data> {
               .formatted(profile().id(), reach.minSize(), reach.maxSize(), request.size()));
     }
     double condition = request.condition();
-    if (!(condition >= 1 && condition <= reach.maxCondition())) {
+    double most = reach.maxConditionAt(request.size());
+    if (!(condition >= 1 && condition <= most)) {
       throw new UnreachableException(
-          "family '%s' makes condition numbers from 1 to %s, but %s is wanted"
+          "family '%s' makes condition numbers from 1 to %s at size %d, but %s is wanted"
               .formatted(
                   profile().id(),
-                  ConditionText.of(reach.maxCondition()),
+                  ConditionText.of(most),
+                  request.size(),
                   ConditionText.of(condition)));
     }
   }

@@ -1,6 +1,7 @@
 package steelyard.problems;
 
 import static org.assertj.core.api.Assertions.assertThat;
+import static org.assertj.core.api.Assertions.assertThatThrownBy;
 
 import java.util.OptionalDouble;
 
@@ -32,13 +33,15 @@ public final class ControlledCondition {
       String task, Family<?> family, double target, int size, int repeat) {
     ProblemId id =
         new ProblemId(task, family.profile().id(), OptionalDouble.of(target), size, repeat, 1);
-    try {
-      double kappa = family.generate(id.request(), id.randomness()).condition().kappa();
-      assertThat(kappa / id.request().condition()).as("%s", id).isBetween(0.5, 2.0);
-      return true;
-    } catch (UnreachableException tooSmall) {
-      assertThat(size).as("%s: %s", id, tooSmall.getMessage()).isLessThan(100);
+    if (size < family.reach().minSize() || target > family.reach().maxConditionAt(size)) {
+      assertThatThrownBy(() -> family.generate(id.request(), id.randomness()))
+          .as("%s", id)
+          .isInstanceOf(UnreachableException.class);
+      assertThat(size).as("%s lies outside the reach", id).isLessThan(100);
       return false;
     }
+    double kappa = family.generate(id.request(), id.randomness()).condition().kappa();
+    assertThat(kappa / id.request().condition()).as("%s", id).isBetween(0.5, 2.0);
+    return true;
   }
 }

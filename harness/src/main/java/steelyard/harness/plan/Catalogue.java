@@ -59,8 +59,9 @@ public record Catalogue(List<TaskEntry> tasks) {
       return Math.max(reach.minSize(), Math.min(reach.maxSize(), size));
     }
 
-    boolean makes(double condition) {
-      return condition >= 1 && condition <= reach.maxCondition();
+    /** Says whether it reaches a condition at every one of these sizes. */
+    boolean makes(double condition, List<Integer> sizes) {
+      return condition >= 1 && sizes.stream().allMatch(n -> condition <= reach.maxConditionAt(n));
     }
   }
 

@@ -44,9 +44,12 @@ final class ShareReader {
     checkCommonSizes();
     checkFamilies(CONDITIONS, families.stream().filter(f -> f.reach().controlled()).toList());
     checkFamilies(SIZES, families);
-    return families.stream()
-        .map(family -> new FamilyShare(family.id(), conditions(family), sizes(family)))
-        .toList();
+    return families.stream().map(this::share).toList();
+  }
+
+  private FamilyShare share(Catalogue.FamilyEntry family) {
+    List<Integer> sizes = sizes(family);
+    return new FamilyShare(family.id(), conditions(family, sizes), sizes);
   }
 
   static String sizeOutOfReach(String task, Catalogue.FamilyEntry family, int size) {
@@ -62,21 +65,21 @@ final class ShareReader {
         + family.reach().maxSize();
   }
 
-  private List<Double> conditions(Catalogue.FamilyEntry family) {
+  private List<Double> conditions(Catalogue.FamilyEntry family, List<Integer> sizes) {
     if (!family.reach().controlled()) {
       return List.of();
     }
     if (hasOwn(CONDITIONS, family)) {
       PlanTable own = table.table(CONDITIONS);
-      return reachable(own, family.id(), conditionList(own, family.id()), family);
+      return reachable(own, family.id(), conditionList(own, family.id()), family, sizes);
     }
     boolean common = hasCommon(CONDITIONS);
     List<Double> wanted = common ? conditionList(table, CONDITIONS) : DEFAULT_CONDITIONS;
     if (common && named) {
-      return reachable(table, CONDITIONS, wanted, family);
+      return reachable(table, CONDITIONS, wanted, family, sizes);
     }
-    List<Double> within = wanted.stream().filter(family::makes).toList();
-    return within.isEmpty() ? List.of(family.reach().maxCondition()) : within;
+    List<Double> within = wanted.stream().filter(c -> family.makes(c, sizes)).toList();
+    return within.isEmpty() ? List.of(most(family, sizes)) : within;
   }
 
   private List<Integer> sizes(Catalogue.FamilyEntry family) {
@@ -92,13 +95,21 @@ final class ShareReader {
   }
 
   private List<Double> reachable(
-      PlanTable at, String key, List<Double> wanted, Catalogue.FamilyEntry family) {
+      PlanTable at,
+      String key,
+      List<Double> wanted,
+      Catalogue.FamilyEntry family,
+      List<Integer> sizes) {
     for (double condition : wanted) {
-      if (!family.makes(condition)) {
-        throw at.fail(key, conditionOutOfReach(family, condition));
+      if (!family.makes(condition, sizes)) {
+        throw at.fail(key, conditionOutOfReach(family, condition, sizes));
       }
     }
     return wanted;
+  }
+
+  private static double most(Catalogue.FamilyEntry family, List<Integer> sizes) {
+    return sizes.stream().mapToDouble(family.reach()::maxConditionAt).min().orElseThrow();
   }
 
   private List<Integer> reachableSizes(
@@ -111,7 +122,13 @@ final class ShareReader {
     return wanted;
   }
 
-  private String conditionOutOfReach(Catalogue.FamilyEntry family, double condition) {
+  private String conditionOutOfReach(
+      Catalogue.FamilyEntry family, double condition, List<Integer> sizes) {
+    double most = most(family, sizes);
+    String atSize =
+        most < family.reach().maxCondition()
+            ? " at size " + sizes.stream().min(Integer::compare).orElseThrow()
+            : "";
     return "condition "
         + DoubleText.shortest(condition)
         + " is out of reach of family '"
@@ -119,7 +136,8 @@ final class ShareReader {
         + "' of task '"
         + task
         + "', which reaches conditions from 1 to "
-        + DoubleText.shortest(family.reach().maxCondition());
+        + DoubleText.shortest(most)
+        + atSize;
   }
 
   /** What no family at all can reach is a mistake, even where the families are left open. */
@@ -130,7 +148,7 @@ final class ShareReader {
         hasCommon(CONDITIONS) ? conditionList(table, CONDITIONS) : List.<Double>of()) {
       if (!named
           && !controlled.isEmpty()
-          && controlled.stream().noneMatch(f -> f.makes(condition))) {
+          && controlled.stream().noneMatch(f -> f.makes(condition, sizes(f)))) {
         double most =
             controlled.stream().mapToDouble(f -> f.reach().maxCondition()).max().orElseThrow();
         throw table.fail(

@@ -4,6 +4,7 @@ import java.util.List;
 import steelyard.problems.Family;
 import steelyard.problems.Family.Profile;
 import steelyard.problems.Reach;
+import steelyard.problems.generate.Cancellation;
 
 /** The catalogue of the families of the task {@code dot}. */
 public final class DotFamilies {
@@ -50,7 +51,7 @@ public final class DotFamilies {
                 + " 2^(50(n-1)+1)",
             "after Ogita, Rump, Oishi, SIAM J. Sci. Comput. 26 (2005), Algorithm 6.1, with the last"
                 + " product calibrated exactly"),
-        Reach.upTo(1e100, 2, LARGEST),
+        Reach.upTo(1e100, 2, LARGEST).limitedBy(n -> 2 * Cancellation.largestRatio(n)),
         CancellingVectors::generate);
   }
 

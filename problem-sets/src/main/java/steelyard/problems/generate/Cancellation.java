@@ -74,6 +74,12 @@ public final class Cancellation {
     new Cancellation(ratio, random, ledger).enter(count);
   }
 
+  /** Returns the largest ratio that so many contributions can reach, 2^(50(count - 1)). */
+  public static double largestRatio(int count) {
+    int levels = Math.min(count - 1, Double.MAX_EXPONENT / BITS_PER_CONTRIBUTION);
+    return Math.scalb(1.0, BITS_PER_CONTRIBUTION * levels);
+  }
+
   private void enter(int count) {
     int needed = Math.max(1, (int) Math.ceil(bits / BITS_PER_CONTRIBUTION));
     if (needed > count - 1) {

@@ -18,6 +18,11 @@ final class ExponentialSeries {
   // A short t keeps its exact powers short.
   private static final double STEP_OF_T = 0x1p-16;
 
+  private static final double JITTER = 0.125;
+
+  // So many terms are enough for every condition number within reach.
+  private static final int MANY_TERMS = 200;
+
   // Smaller t would leave one term alone; exp(2t) = 1.65 is within a factor of two of 1.
   private static final double LEAST_T = 0.25;
 
@@ -45,8 +50,28 @@ final class ExponentialSeries {
     return terms;
   }
 
+  /**
+   * Returns the largest condition number for which so many terms come near enough to exp(-t). It
+   * leaves room for the jitter of t, and is a power of two.
+   */
+  static double largestCondition(int count) {
+    double condition = 1;
+    while (condition < 1e16 && converges(count, StrictMath.log(condition * 2) / 2 + JITTER)) {
+      condition *= 2;
+    }
+    return condition;
+  }
+
+  private static boolean converges(int count, double t) {
+    double logOfOmitted = count * StrictMath.log(t);
+    for (int k = 2; k <= count && k <= MANY_TERMS; k++) {
+      logOfOmitted -= StrictMath.log(k);
+    }
+    return count >= MANY_TERMS || (count >= t && logOfOmitted < StrictMath.log(TOLERATED_TAIL) - t);
+  }
+
   private static double argument(double condition, UniformRandomProvider random) {
-    double jitter = (random.nextDouble() - 0.5) / 4;
+    double jitter = (random.nextDouble() - 0.5) * 2 * JITTER;
     double t = Math.max(LEAST_T, StrictMath.log(condition) / 2 + jitter);
     return Math.rint(t / STEP_OF_T) * STEP_OF_T;
   }

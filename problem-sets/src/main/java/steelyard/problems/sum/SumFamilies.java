@@ -4,6 +4,7 @@ import java.util.List;
 import steelyard.problems.Family;
 import steelyard.problems.Family.Profile;
 import steelyard.problems.Reach;
+import steelyard.problems.generate.Cancellation;
 
 /** The catalogue of the families of the task {@code sum}. */
 public final class SumFamilies {
@@ -56,7 +57,7 @@ public final class SumFamilies {
             "condition number; n terms allow at most 2^(50(n-1))",
             "after Ogita, Rump, Oishi, SIAM J. Sci. Comput. 26 (2005), Algorithm 6.1, for terms"
                 + " instead of products and with the last term calibrated exactly"),
-        Reach.upTo(1e100, 2, LARGEST),
+        Reach.upTo(1e100, 2, LARGEST).limitedBy(Cancellation::largestRatio),
         CancellingTerms::generate);
   }
 
@@ -68,7 +69,7 @@ public final class SumFamilies {
             "condition number exp(2t); a small n allows less",
             "the power series of exp(-t); Higham, Accuracy and Stability of Numerical Algorithms,"
                 + " 2nd ed., 2002, Chapter 4"),
-        Reach.upTo(1e16, 2, LARGEST),
+        Reach.upTo(1e16, 2, LARGEST).limitedBy(ExponentialSeries::largestCondition),
         ExponentialSeries::generate);
   }
 

@@ -49,9 +49,29 @@ public final class RunFolder {
       if (made) {
         removeIfEmpty(folder);
       }
-      throw new RunException(
-          folder + ": the run cannot be written (" + reason(e) + "); name another folder.", e);
+      throw unwritable(folder, e);
     }
+  }
+
+  /**
+   * Makes sure, before hours are spent, that a run can be written to a folder, and makes the
+   * folder.
+   *
+   * @throws RunException as {@link #write} would throw it
+   */
+  public static void prepare(Path folder, Existing existing) {
+    checkTarget(folder, existing);
+    try {
+      Files.createDirectories(folder);
+      Files.delete(Files.createTempFile(folder, "probe", FileSet.ASIDE));
+    } catch (IOException e) {
+      throw unwritable(folder, e);
+    }
+  }
+
+  private static RunException unwritable(Path folder, IOException e) {
+    return new RunException(
+        folder + ": the run cannot be written (" + reason(e) + "); name another folder.", e);
   }
 
   private static FileSet files(Run run) {

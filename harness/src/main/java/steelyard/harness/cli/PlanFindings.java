@@ -1,0 +1,54 @@
+package steelyard.harness.cli;
+
+import java.util.ArrayList;
+import java.util.List;
+import steelyard.harness.plan.Plan;
+import steelyard.harness.plan.Requirement;
+import steelyard.results.choice.Choice;
+import steelyard.results.choice.Chooser;
+import steelyard.results.run.Run;
+import steelyard.results.verdict.BrokenBound;
+
+/**
+ * What in a run asks for somebody's attention, a line each: claimed bounds that were broken, and
+ * requirements of the plan that no candidate meets.
+ */
+record PlanFindings(List<String> lines) {
+
+  static PlanFindings of(Plan plan, Run run) {
+    List<String> lines = new ArrayList<>();
+    for (BrokenBound broken : BrokenBound.in(run.observations())) {
+      lines.add(
+          "finding: bound broken by "
+              + broken.candidate()
+              + " on "
+              + broken.problem()
+              + ": "
+              + broken.limits()
+              + " is above the claimed bound");
+    }
+    for (Requirement requirement : plan.requirements()) {
+      Choice choice = choice(requirement, run);
+      if (choice.qualified().isEmpty()) {
+        lines.add(
+            "finding: no candidate of "
+                + requirement.task()
+                + " meets the plan's requirement at size "
+                + requirement.size());
+      }
+    }
+    return new PlanFindings(List.copyOf(lines));
+  }
+
+  private static Choice choice(Requirement requirement, Run run) {
+    return Chooser.choose(
+        new steelyard.results.choice.Requirement(
+            requirement.task(),
+            requirement.error(),
+            requirement.conditionUpTo(),
+            requirement.size(),
+            List.of()),
+        run.observations(),
+        run.timings());
+  }
+}

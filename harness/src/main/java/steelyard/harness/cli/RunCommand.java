@@ -1,0 +1,145 @@
+package steelyard.harness.cli;
+
+import java.io.IOException;
+import java.io.PrintWriter;
+import java.nio.file.Path;
+import java.time.Instant;
+import java.util.List;
+import java.util.Optional;
+import java.util.concurrent.Callable;
+import picocli.CommandLine;
+import picocli.CommandLine.Command;
+import picocli.CommandLine.Option;
+import picocli.CommandLine.Parameters;
+import steelyard.harness.execution.Execution;
+import steelyard.harness.execution.PlanExecution;
+import steelyard.harness.plan.Catalogue;
+import steelyard.harness.plan.Plan;
+import steelyard.harness.plan.PlanReader;
+import steelyard.harness.task.Tasks;
+import steelyard.harness.timing.JmhStopwatch;
+import steelyard.results.run.Run;
+import steelyard.results.run.RunFolder;
+import steelyard.results.text.SummaryText;
+
+/** Executes a plan and writes a run. */
+@Command(
+    name = "run",
+    description = {
+      "Execute a plan: make problems, compute references, run every candidate, take times, write a",
+      "run folder and print one table for each task."
+    },
+    mixinStandardHelpOptions = true)
+final class RunCommand implements Callable<Integer> {
+
+  @CommandLine.Spec private CommandLine.Model.CommandSpec spec;
+
+  @Parameters(paramLabel = "PLAN", description = "A built-in plan (tour, nightly), or a TOML file.")
+  private String planName;
+
+  @Option(
+      names = "--out",
+      paramLabel = "DIR",
+      description = "The run folder to write; default: runs/ and the plan's name.")
+  private Path out;
+
+  @Option(names = "--seed", paramLabel = "SEED", description = "Another seed than the plan's.")
+  private Long seed;
+
+  @Option(names = "--only", paramLabel = "TASK", description = "Only this task of the plan.")
+  private String only;
+
+  @Option(names = "--no-timing", description = "Measure errors alone.")
+  private boolean noTiming;
+
+  @Option(
+      names = "--threads",
+      paramLabel = "T",
+      description = "Problems to work on at a time; default: the number of processor cores.")
+  private Integer threads;
+
+  @Option(names = "--overwrite", description = "Replace the run that is already in the folder.")
+  private boolean overwrite;
+
+  RunCommand() {}
+
+  @Override
+  public Integer call() throws IOException {
+    Plan plan = plan();
+    int workers = workers();
+    Path folder = out != null ? out : Path.of("runs", folderName(plan.name()));
+    RunFolder.Existing existing = overwrite ? RunFolder.Existing.REPLACE : RunFolder.Existing.KEEP;
+    RunFolder.prepare(folder, existing);
+    PrintWriter err = spec.commandLine().getErr();
+    Screen screen = Screen.ofProcess();
+    Instant started = Instant.now();
+    try (InterruptWatch watch = new InterruptWatch()) {
+      Execution execution =
+          new PlanExecution(
+                  Tasks.all(),
+                  new JmhStopwatch(),
+                  workers,
+                  new ProgressReport(err, screen.terminal(), System::currentTimeMillis),
+                  watch.interruption())
+              .execute(plan);
+      Run run =
+          Run.of(
+              execution.observations(),
+              execution.timings(),
+              plan.toToml(),
+              RunRecord.of(plan, execution, started, Instant.now()));
+      RunFolder.write(folder, run, existing);
+      return report(plan, execution, run, folder, screen);
+    }
+  }
+
+  private int report(Plan plan, Execution execution, Run run, Path folder, Screen screen) {
+    PrintWriter output = spec.commandLine().getOut();
+    output.println();
+    output.print(
+        SummaryText.render(run.verdicts(), run.timings(), run.tradeoffs(), screen.colour()));
+    output.println("written to " + folder);
+    PlanFindings findings = PlanFindings.of(plan, run);
+    findings.lines().forEach(output::println);
+    output.flush();
+    PrintWriter err = spec.commandLine().getErr();
+    if (execution.strayCalls() > 0) {
+      err.println(
+          "steelyard: "
+              + execution.strayCalls()
+              + " calls never returned and kept processors busy, so times may be too high");
+    }
+    if (!execution.complete()) {
+      err.println("steelyard: interrupted; what was finished is in " + folder);
+      return ExitCode.INCOMPLETE;
+    }
+    return findings.lines().isEmpty() ? ExitCode.DONE : ExitCode.FINDING;
+  }
+
+  private Plan plan() {
+    Plan plan = new PlanReader(Catalogue.of(Tasks.all())).find(planName);
+    if (seed != null) {
+      plan = plan.withSeed(seed);
+    }
+    if (only != null) {
+      plan = plan.only(only);
+    }
+    return noTiming ? plan.withoutTiming() : plan;
+  }
+
+  private int workers() {
+    int wanted = Optional.ofNullable(threads).orElse(Runtime.getRuntime().availableProcessors());
+    if (wanted < 1 || wanted > MAX_THREADS) {
+      throw new BadInputException(
+          "--threads must be from 1 to " + MAX_THREADS + ", found " + wanted);
+    }
+    return wanted;
+  }
+
+  private static final int MAX_THREADS = 1024;
+
+  private static String folderName(String planName) {
+    String name = planName.strip().replaceAll("[^A-Za-z0-9._-]+", "-");
+    return List.of("", ".", "..").contains(name) ? "run" : name;
+  }
+}

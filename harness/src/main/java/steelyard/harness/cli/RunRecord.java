@@ -1,0 +1,38 @@
+package steelyard.harness.cli;
+
+import java.time.Instant;
+import java.util.Optional;
+import java.util.TreeMap;
+import steelyard.harness.execution.Execution;
+import steelyard.harness.execution.Libraries;
+import steelyard.harness.execution.Machine;
+import steelyard.harness.plan.Plan;
+import steelyard.results.run.Provenance;
+
+/** Collects what a run records of where it comes from. */
+final class RunRecord {
+
+  private RunRecord() {}
+
+  static Provenance of(Plan plan, Execution execution, Instant started, Instant ended) {
+    TreeMap<String, Long> counts = new TreeMap<>();
+    counts.put("observations", (long) execution.observations().size());
+    counts.put("timings", (long) execution.timings().size());
+    counts.put("problems_planned", (long) plan.problems().size());
+    return new Provenance(
+        Version.text(),
+        plan.name(),
+        plan.seed(),
+        started,
+        Optional.of(ended),
+        execution.complete(),
+        new Provenance.Jvm(
+            System.getProperty("java.version"),
+            System.getProperty("java.vendor"),
+            System.getProperty("java.vm.name"),
+            Machine.flags()),
+        new Provenance.Machine(Machine.processor(), Machine.cores(), Machine.operatingSystem()),
+        new TreeMap<>(Libraries.versions()),
+        counts);
+  }
+}

@@ -1,0 +1,85 @@
+package steelyard.harness.execution;
+
+import java.io.IOException;
+import java.time.Duration;
+import java.util.List;
+import java.util.Optional;
+import steelyard.harness.plan.Plan;
+import steelyard.harness.plan.ProblemCell;
+import steelyard.harness.plan.TimingEffort;
+import steelyard.harness.run.AccuracyPhase;
+import steelyard.harness.run.Assignment;
+import steelyard.harness.run.Interruption;
+import steelyard.harness.run.Progress;
+import steelyard.harness.task.Task;
+import steelyard.harness.timing.Stopwatch;
+import steelyard.harness.timing.TimingPhase;
+import steelyard.problems.ProblemId;
+import steelyard.results.Timing;
+
+/** Executes a plan: accuracy on all threads first, then times with nothing else running. */
+public final class PlanExecution {
+
+  private final Workbench workbench;
+  private final Stopwatch stopwatch;
+  private final int threads;
+  private final Progress progress;
+  private final Interruption interruption;
+
+  /**
+   * Prepares an execution.
+   *
+   * @param tasks the tasks that plans may name
+   * @param stopwatch what measures times
+   * @param threads how many problems to work on at a time, at least 1
+   * @param progress hears of each step
+   * @param interruption asks to stop early
+   */
+  public PlanExecution(
+      List<Task<?, ?>> tasks,
+      Stopwatch stopwatch,
+      int threads,
+      Progress progress,
+      Interruption interruption) {
+    this.workbench = new Workbench(tasks);
+    this.stopwatch = stopwatch;
+    this.threads = threads;
+    this.progress = progress;
+    this.interruption = interruption;
+  }
+
+  /**
+   * Executes a plan.
+   *
+   * @param plan a plan that was checked against the same tasks
+   * @throws IOException if inputs cannot be handed over to the timed JVMs
+   */
+  public Execution execute(Plan plan) throws IOException {
+    AccuracyPhase.Outcome accuracy =
+        new AccuracyPhase(threads, progress, interruption)
+            .run(
+                plan.problems().stream()
+                    .<Assignment<?, ?>>map(cell -> assignment(cell, plan.seed()))
+                    .toList());
+    TimingPhase.Outcome timing = new TimingPhase.Outcome(List.<Timing>of(), true);
+    Optional<TimingEffort> effort = plan.timing();
+    if (effort.isPresent() && !interruption.requested()) {
+      TimingJobs jobs = new TimingJobs(workbench, accuracy.observations(), plan.seed());
+      timing =
+          new TimingPhase(stopwatch, effort.get(), progress, interruption)
+              .run(jobs.of(plan.timings()));
+    }
+    return new Execution(
+        accuracy.observations(),
+        timing.timings(),
+        accuracy.complete() && timing.complete() && !interruption.requested(),
+        accuracy.strayCalls());
+  }
+
+  private Assignment<?, ?> assignment(ProblemCell cell, long seed) {
+    ProblemId id =
+        new ProblemId(
+            cell.task(), cell.family(), cell.condition(), cell.size(), cell.repeat(), seed);
+    return workbench.assignment(id, cell.candidates(), Duration.ofMillis(cell.timeoutMs()));
+  }
+}

@@ -1,0 +1,50 @@
+package steelyard.harness.task;
+
+import java.util.List;
+import org.openjdk.jmh.infra.Blackhole;
+import steelyard.algorithms.Candidate;
+import steelyard.algorithms.solve.LinearSolver;
+import steelyard.algorithms.solve.LinearSolvers;
+import steelyard.problems.Data;
+import steelyard.problems.Family;
+import steelyard.problems.solve.LinearSystem;
+import steelyard.problems.solve.SystemFamilies;
+
+/** Binds linear solvers to square systems. */
+final class SolveTask implements Task<LinearSolver, LinearSystem> {
+
+  @Override
+  public String id() {
+    return "solve";
+  }
+
+  @Override
+  public String description() {
+    return "the solution of a square system of linear equations";
+  }
+
+  @Override
+  public List<Candidate<LinearSolver>> candidates() {
+    return LinearSolvers.all();
+  }
+
+  @Override
+  public List<Family<LinearSystem>> families() {
+    return SystemFamilies.all();
+  }
+
+  @Override
+  public LinearSystem data(List<Data.Part> parts) {
+    return new LinearSystem(Parts.matrix(parts, 0), Parts.vector(parts, 1));
+  }
+
+  @Override
+  public double[] apply(LinearSolver kernel, LinearSystem data) {
+    return kernel.solve(data.a(), data.b());
+  }
+
+  @Override
+  public void time(LinearSolver kernel, LinearSystem data, Blackhole sink) {
+    sink.consume(kernel.solve(data.a(), data.b()));
+  }
+}

@@ -1,0 +1,81 @@
+package steelyard.harness.timing;
+
+import java.nio.file.Path;
+import java.util.Collection;
+import java.util.OptionalDouble;
+import org.openjdk.jmh.profile.GCProfiler;
+import org.openjdk.jmh.results.Result;
+import org.openjdk.jmh.results.RunResult;
+import org.openjdk.jmh.runner.Runner;
+import org.openjdk.jmh.runner.RunnerException;
+import org.openjdk.jmh.runner.options.Options;
+import org.openjdk.jmh.runner.options.OptionsBuilder;
+import org.openjdk.jmh.runner.options.TimeValue;
+import org.openjdk.jmh.runner.options.VerboseMode;
+import org.openjdk.jmh.util.Statistics;
+import steelyard.harness.plan.TimingEffort;
+
+/** Measures with JMH in forked JVMs, and reads its result objects. */
+public final class JmhStopwatch implements Stopwatch {
+
+  private static final double CONFIDENCE = 0.999;
+  private static final String ALLOCATION = "gc.alloc.rate.norm";
+
+  @Override
+  public Score measure(String task, String candidate, Path data, TimingEffort effort)
+      throws TimingException {
+    try {
+      Collection<RunResult> results = new Runner(options(task, candidate, data, effort)).run();
+      if (results.isEmpty()) {
+        throw new TimingException("JMH gave no result", null);
+      }
+      return score(results.iterator().next());
+    } catch (RunnerException failed) {
+      throw new TimingException(sentence(failed), failed);
+    }
+  }
+
+  private static Options options(String task, String candidate, Path data, TimingEffort effort) {
+    TimeValue iteration = TimeValue.milliseconds(effort.iterationMs());
+    return new OptionsBuilder()
+        .jvmArgs()
+        .include("^" + KernelBenchmark.class.getName().replace(".", "\\.") + "\\.call$")
+        .param("task", task)
+        .param("candidate", candidate)
+        .param("data", data.toString())
+        .forks(effort.forks())
+        .warmupIterations(effort.warmup())
+        .warmupTime(iteration)
+        .measurementIterations(effort.measurement())
+        .measurementTime(iteration)
+        .addProfiler(GCProfiler.class)
+        .verbosity(VerboseMode.SILENT)
+        .shouldFailOnError(true)
+        .build();
+  }
+
+  private static Score score(RunResult result) {
+    Statistics statistics = result.getPrimaryResult().getStatistics();
+    double mean = statistics.getMean();
+    double[] interval = statistics.getConfidenceIntervalAt(CONFIDENCE);
+    Result<?> allocation = result.getSecondaryResults().get(ALLOCATION);
+    return new Score(
+        mean,
+        Math.max(0, finiteOr(interval[0], mean)),
+        finiteOr(interval[1], mean),
+        allocation == null ? OptionalDouble.empty() : OptionalDouble.of(allocation.getScore()));
+  }
+
+  /** A single iteration has no interval; its ends are then the figure itself. */
+  private static double finiteOr(double value, double otherwise) {
+    return Double.isFinite(value) ? value : otherwise;
+  }
+
+  private static String sentence(RunnerException failed) {
+    String message = String.valueOf(failed.getMessage());
+    if (message.contains("lock")) {
+      return "another timing run is under way on this machine; wait for it, or use --no-timing";
+    }
+    return "the timed program failed: " + message.lines().findFirst().orElse("no reason given");
+  }
+}
