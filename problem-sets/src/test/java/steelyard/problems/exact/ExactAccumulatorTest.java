@@ -58,23 +58,29 @@ class ExactAccumulatorTest {
     assertThat(accumulator.value()).isEqualTo(Dyadic.ZERO);
   }
 
-  /** Far more terms of one size and sign than chunks could gather without passing carries. */
+  /**
+   * Far more terms of one sign and size than chunks could gather without passing carries, at every
+   * place that a significand can take within a chunk.
+   */
   @Test
   void passesCarriesInTime() {
-    for (double term : new double[] {Double.MAX_VALUE, -Math.nextDown(2.0), Double.MIN_VALUE}) {
-      ExactAccumulator accumulator = new ExactAccumulator();
-      int count = 100_003;
-      for (int i = 0; i < count; i++) {
-        accumulator.add(term);
-      }
-      assertThat(accumulator.value()).isEqualTo(Dyadic.of(term).multiply(Dyadic.of((long) count)));
-      for (int i = 0; i < count; i++) {
-        accumulator.addProduct(term, term);
-        accumulator.addProduct(0x1p-500, term);
+    Dyadic count = Dyadic.of(10_007);
+    for (int place = 0; place < 32; place++) {
+      double term = Math.scalb(place % 2 == 0 ? -0x1.fffffffffffffp0 : 0x1.fffffffffffffp0, place);
+      double unsafe = Math.scalb(term, -500);
+      ExactAccumulator sums = new ExactAccumulator();
+      ExactAccumulator products = new ExactAccumulator();
+      ExactAccumulator unsafeProducts = new ExactAccumulator();
+      for (int i = 0; i < 10_007; i++) {
+        sums.add(term);
+        products.addProduct(term, 0x1.fffffffffffffp0);
+        unsafeProducts.addProduct(unsafe, 0x1.fffffffffffffp-520);
       }
       Dyadic value = Dyadic.of(term);
-      Dyadic each = value.multiply(value.add(Dyadic.powerOfTwo(-500))).add(value);
-      assertThat(accumulator.value()).isEqualTo(each.multiply(Dyadic.of((long) count)));
+      Dyadic product = value.multiply(Dyadic.of(0x1.fffffffffffffp0));
+      assertThat(sums.value()).isEqualTo(value.multiply(count));
+      assertThat(products.value()).isEqualTo(product.multiply(count));
+      assertThat(unsafeProducts.value()).isEqualTo(product.multiply(count).scalb(-1020));
     }
   }
 
