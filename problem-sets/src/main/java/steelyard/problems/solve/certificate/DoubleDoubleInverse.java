@@ -3,6 +3,7 @@ package steelyard.problems.solve.certificate;
 import java.util.Arrays;
 import java.util.Optional;
 import steelyard.problems.exact.Dyadic;
+import steelyard.problems.exact.ErrorFree;
 
 /**
  * An approximate inverse R = H + L in double-double, where |L| &lt;= 2^-52 |H|.
@@ -31,6 +32,7 @@ final class DoubleDoubleInverse implements ApproximateInverse {
   private final double[] high;
   private final double[] low;
 
+  /** Makes one of two matrices, which are split anew so that |L| is at most 2^-53 |H|. */
   DoubleDoubleInverse(ScaledSystem system, double[] high, double[] low) {
     size = system.size;
     matrix = system.matrix;
@@ -38,7 +40,7 @@ final class DoubleDoubleInverse implements ApproximateInverse {
     this.low = low;
     for (int i = 0; i < high.length; i++) {
       double sum = high[i] + low[i];
-      low[i] = low[i] - (sum - high[i]);
+      low[i] = ErrorFree.sumError(high[i], low[i]);
       high[i] = sum;
     }
   }

@@ -116,26 +116,6 @@ class CertificateTest {
         && RationalInverse.exact(norm.upper()).compareTo(exact) >= 0;
   }
 
-  // Without the allowance for underflow the products below would vanish.
-  @Test
-  void underflowIsAllowedFor() {
-    double tiny = Double.MIN_VALUE;
-    double[] upper = new InverseBounds(honest).upper(new double[] {tiny, tiny, tiny});
-    RationalInverse exact = new RationalInverse(scaledRows());
-    for (int i = 0; i < 3; i++) {
-      BigFraction sum = BigFraction.ZERO;
-      for (int j = 0; j < 3; j++) {
-        sum = sum.add(exact.entry(i, j).abs().multiply(RationalInverse.exact(tiny)));
-      }
-      assertThat(RationalInverse.exact(upper[i]).compareTo(sum)).isNotNegative();
-    }
-    Enclosure zeroToTiny = new Enclosure(tiny, tiny);
-    for (Enclosure row :
-        new InverseBounds(honest).enclose(new Enclosure[] {zeroToTiny, zeroToTiny, zeroToTiny})) {
-      assertThat(row.lower()).isZero();
-    }
-  }
-
   @Test
   void singularMatricesAreNamedSo() {
     double[][] rankTwo = {{1, 2, 3}, {4, 5, 6}, {7, 8, 9}};
@@ -184,14 +164,6 @@ class CertificateTest {
       a[i][i] = 1;
     }
     return a;
-  }
-
-  private double[][] scaledRows() {
-    double[][] rows = new double[3][];
-    for (int i = 0; i < 3; i++) {
-      rows[i] = Arrays.copyOfRange(system.matrix, 3 * i, 3 * i + 3);
-    }
-    return rows;
   }
 
   private ApproximateInverse withResiduals(double residual) {

@@ -1,0 +1,79 @@
+package steelyard.problems.solve.certificate;
+
+import static org.assertj.core.api.Assertions.assertThat;
+
+import java.util.Arrays;
+import org.junit.jupiter.api.Test;
+import steelyard.problems.exact.Dyadic;
+
+/**
+ * The evaluation of |R| v, on numbers chosen so that plain double arithmetic errs in one direction
+ * by more than the last bit.
+ */
+class InverseBoundsTest {
+  private static final int SIZE = 300;
+
+  /** An approximate inverse that is exact and has given entries. */
+  private record Given(double[] magnitudes) implements ApproximateInverse {
+    @Override
+    public int size() {
+      return SIZE;
+    }
+
+    @Override
+    public double[] residualRowSums() {
+      return new double[SIZE];
+    }
+
+    @Override
+    public double[][] times(Dyadic[] v) {
+      throw new UnsupportedOperationException();
+    }
+  }
+
+  @Test
+  void boundsCoverRoundingDown() {
+    // Each term but the first is lost.
+    requireBounds(1, 0.4 * 0x1p-53, 1);
+  }
+
+  @Test
+  void boundsCoverRoundingUp() {
+    // Each term but the first counts as a whole unit in the last place.
+    requireBounds(1, 0.6 * 0x1p-52, 1);
+  }
+
+  @Test
+  void boundsCoverUnderflowToZero() {
+    requireBounds(0.4, 0.4, Double.MIN_VALUE);
+  }
+
+  @Test
+  void boundsCoverUnderflowToTheLeastDouble() {
+    requireBounds(0.6, 0.6, Double.MIN_VALUE);
+  }
+
+  private static void requireBounds(double first, double others, double entry) {
+    double[] magnitudes = new double[SIZE * SIZE];
+    Arrays.fill(magnitudes, others);
+    for (int i = 0; i < SIZE; i++) {
+      magnitudes[i * SIZE] = first;
+    }
+    Dyadic exact =
+        Dyadic.of(first)
+            .add(Dyadic.of(others).multiply(Dyadic.of(SIZE - 1L)))
+            .multiply(Dyadic.of(entry));
+    InverseBounds bounds = new InverseBounds(new Given(magnitudes));
+    double[] v = new double[SIZE];
+    Arrays.fill(v, entry);
+    Enclosure[] enclosed = new Enclosure[SIZE];
+    Arrays.fill(enclosed, Enclosure.of(entry));
+    for (double upper : bounds.upper(v)) {
+      assertThat(Dyadic.of(upper)).isGreaterThanOrEqualTo(exact);
+    }
+    for (Enclosure row : bounds.enclose(enclosed)) {
+      assertThat(Dyadic.of(row.lower())).isLessThanOrEqualTo(exact);
+      assertThat(Dyadic.of(row.upper())).isGreaterThanOrEqualTo(exact);
+    }
+  }
+}
