@@ -76,7 +76,7 @@ class CatalogueTest {
             "dot/cancelling/k1e10/n77/r2 6471b6a6",
             "dot/wide-exponent/n77/r2 5c17b34c",
             "dot/near-overflow/n77/r2 c55a08b6",
-            "dot/near-underflow/n77/r2 be675cc1");
+            "dot/near-underflow/n77/r2 e12d9b16");
   }
 
   @Test

@@ -13,6 +13,7 @@ final class ProgressReport implements Progress {
 
   private static final long PLAIN_INTERVAL_MS = 5_000;
   private static final long TERMINAL_INTERVAL_MS = 100;
+  private static final long LEAST_FOR_A_GUESS_MS = 2_000;
   private static final int WIDTH = 100;
 
   private final PrintWriter err;
@@ -47,7 +48,7 @@ final class ProgressReport implements Progress {
   private String line(String current, int done, int total, long elapsedMs) {
     StringBuilder line = new StringBuilder();
     line.append(phase).append(' ').append(done).append(" of ").append(total);
-    if (done > 0 && done < total) {
+    if (elapsedMs >= LEAST_FOR_A_GUESS_MS && done > 0 && done < total) {
       line.append(", about ").append(duration(elapsedMs * (total - done) / done)).append(" left");
     } else if (done >= total) {
       line.append(", took ").append(duration(elapsedMs));

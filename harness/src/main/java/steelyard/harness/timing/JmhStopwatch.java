@@ -1,5 +1,8 @@
 package steelyard.harness.timing;
 
+import java.io.OutputStream;
+import java.io.PrintStream;
+import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
 import java.util.Collection;
 import java.util.OptionalDouble;
@@ -8,6 +11,8 @@ import org.openjdk.jmh.results.Result;
 import org.openjdk.jmh.results.RunResult;
 import org.openjdk.jmh.runner.Runner;
 import org.openjdk.jmh.runner.RunnerException;
+import org.openjdk.jmh.runner.format.OutputFormat;
+import org.openjdk.jmh.runner.format.OutputFormatFactory;
 import org.openjdk.jmh.runner.options.Options;
 import org.openjdk.jmh.runner.options.OptionsBuilder;
 import org.openjdk.jmh.runner.options.TimeValue;
@@ -21,11 +26,15 @@ public final class JmhStopwatch implements Stopwatch {
   private static final double CONFIDENCE = 0.999;
   private static final String ALLOCATION = "gc.alloc.rate.norm";
 
+  /** Makes a stopwatch. */
+  public JmhStopwatch() {}
+
   @Override
   public Score measure(String task, String candidate, Path data, TimingEffort effort)
       throws TimingException {
     try {
-      Collection<RunResult> results = new Runner(options(task, candidate, data, effort)).run();
+      Collection<RunResult> results =
+          new Runner(options(task, candidate, data, effort), nowhere()).run();
       if (results.isEmpty()) {
         throw new TimingException("JMH gave no result", null);
       }
@@ -33,6 +42,13 @@ public final class JmhStopwatch implements Stopwatch {
     } catch (RunnerException failed) {
       throw new TimingException(sentence(failed), failed);
     }
+  }
+
+  /** What a fork prints must not get among the results. */
+  private static OutputFormat nowhere() {
+    PrintStream sink =
+        new PrintStream(OutputStream.nullOutputStream(), false, StandardCharsets.UTF_8);
+    return OutputFormatFactory.createFormatInstance(sink, VerboseMode.SILENT);
   }
 
   private static Options options(String task, String candidate, Path data, TimingEffort effort) {

@@ -83,7 +83,7 @@ public final class DotFamilies {
             "near-underflow",
             "products whose last bits are below the least double, so that no two-product is exact",
             "none",
-            OWN + "random signs, exponents of the products from -1080 to -970"),
+            OWN + "random signs, exponents of the products from -1074 to -1024"),
         Reach.uncontrolled(1, LARGEST),
         OrdinaryVectors::nearUnderflow);
   }

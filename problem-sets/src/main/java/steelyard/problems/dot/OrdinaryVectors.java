@@ -47,7 +47,7 @@ final class OrdinaryVectors {
 
   /** Products whose last bits fall below the least double, and some that do so themselves. */
   static Vectors nearUnderflow(Family.Request request, UniformRandomProvider random) {
-    IntSupplier small = () -> Draw.between(random, -540, -485);
+    IntSupplier small = () -> Draw.between(random, -537, -512);
     return signed(request.size(), random, small, small);
   }
 
