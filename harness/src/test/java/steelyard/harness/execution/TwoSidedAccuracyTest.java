@@ -27,7 +27,8 @@ import steelyard.results.verdict.Verdicts;
 /**
  * Each candidate passes where theory says that it must, and fails where theory says that it must:
  * the second proves that the problems are hard. ASNA is Higham, Accuracy and Stability of Numerical
- * Algorithms, 2nd ed., 2002.
+ * Algorithms, 2nd ed., 2002; its section and equation numbers in the table, other than (4.4) to
+ * (4.8), 9.5 and 10.4, are from memory.
  */
 final class TwoSidedAccuracyTest {
 
