@@ -53,33 +53,44 @@ public final class TimingPhase {
     List<Timing> rows = new ArrayList<>();
     int done = 0;
     for (TimingJob<?, ?> job : jobs) {
+      if (interruption.requested()) {
+        break;
+      }
       Path file = Files.createTempFile("steelyard-input", ".bin");
       try {
         DataFile.write(file, job.input().parts());
-        Map<String, Measured> measured = new LinkedHashMap<>();
-        for (TimingJob.Entry entry : job.candidates()) {
-          if (interruption.requested()) {
-            break;
-          }
-          progress.step(NAME, job.id().toString() + " " + entry.candidate(), done, total);
-          measured.put(entry.candidate(), measure(job, entry, file));
-          done++;
-        }
-        if (interruption.requested()) {
-          break;
-        }
+        Map<String, Measured> measured = measure(job, file, done, total);
+        done += measured.size();
         rows.addAll(rows(job, measured));
       } finally {
         Files.deleteIfExists(file);
       }
     }
-    if (total > 0) {
+    if (total > 0 && done == total) {
       progress.step(NAME, "", done, total);
     }
-    return new Outcome(rows, done == total && !interruption.requested());
+    return new Outcome(rows, done == total);
   }
 
   private record Measured(Optional<Score> score, String detail) {}
+
+  private Map<String, Measured> measure(TimingJob<?, ?> job, Path file, int before, int total) {
+    Map<String, Measured> measured = new LinkedHashMap<>();
+    for (TimingJob.Entry entry : job.candidates()) {
+      progress.step(
+          NAME, job.id().toString() + " " + entry.candidate(), before + measured.size(), total);
+      Measured result = measure(job, entry, file);
+      boolean interrupted = interruption.requested();
+      // An interrupt reaches the fork as well: that it failed then says nothing of the candidate.
+      if (!interrupted || result.score().isPresent()) {
+        measured.put(entry.candidate(), result);
+      }
+      if (interrupted) {
+        break;
+      }
+    }
+    return measured;
+  }
 
   private Measured measure(TimingJob<?, ?> job, TimingJob.Entry entry, Path file) {
     if (entry.obstacle().isPresent()) {
