@@ -34,14 +34,14 @@ public interface Family<D extends Data> {
     Reach reach = reach();
     if (request.size() < reach.minSize() || request.size() > reach.maxSize()) {
       throw new UnreachableException(
-          "family '%s' makes sizes from %d to %d, but size %d is wanted"
+          "family '%s' makes sizes from %s to %s, but size %s is wanted"
               .formatted(profile().id(), reach.minSize(), reach.maxSize(), request.size()));
     }
     double condition = request.condition();
     double most = reach.maxConditionAt(request.size());
     if (!(condition >= 1 && condition <= most)) {
       throw new UnreachableException(
-          "family '%s' makes condition numbers from 1 to %s at size %d, but %s is wanted"
+          "family '%s' makes condition numbers from 1 to %s at size %s, but %s is wanted"
               .formatted(
                   profile().id(),
                   ConditionText.of(most),

@@ -84,7 +84,7 @@ public final class Cancellation {
     int needed = Math.max(1, (int) Math.ceil(bits / BITS_PER_CONTRIBUTION));
     if (needed > count - 1) {
       throw new UnreachableException(
-          "%d terms cannot cancel by a factor beyond 2^%d; a larger size is wanted"
+          "%s terms cannot cancel by a factor beyond 2^%s; a larger size is wanted"
               .formatted(count, BITS_PER_CONTRIBUTION * (count - 1)));
     }
     int levels = Math.max(needed, Math.min(count / 2, usefulLevels()));

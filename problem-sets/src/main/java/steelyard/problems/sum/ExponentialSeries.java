@@ -81,7 +81,7 @@ final class ExponentialSeries {
     double limit = TOLERATED_TAIL * StrictMath.exp(-t);
     if (count < t || Math.abs(omitted) > limit) {
       throw new UnreachableException(
-          "the first %d terms of the series are too few to add up to exp(-t) at this condition"
+          "the first %s terms of the series are too few to add up to exp(-t) at this condition"
                   .formatted(count)
               + " number; a larger size is wanted");
     }
