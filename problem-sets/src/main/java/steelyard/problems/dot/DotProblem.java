@@ -2,11 +2,7 @@ package steelyard.problems.dot;
 
 import java.util.Set;
 import java.util.TreeSet;
-import steelyard.problems.Condition;
-import steelyard.problems.ExactReference;
-import steelyard.problems.Judgement;
-import steelyard.problems.Problem;
-import steelyard.problems.Reference;
+import steelyard.problems.ExactScalarProblem;
 import steelyard.problems.ScalarJudge;
 import steelyard.problems.Trait;
 import steelyard.problems.exact.Dyadic;
@@ -22,10 +18,7 @@ import steelyard.problems.exact.ExactAccumulator;
  * @see <a href="https://doi.org/10.1137/030601818">Ogita, Rump and Oishi, Accurate sum and dot
  *     product, SIAM Journal on Scientific Computing 26 (2005)</a>
  */
-public final class DotProblem implements Problem<Vectors> {
-  private final Vectors data;
-  private final ScalarJudge judge;
-  private final Set<String> traits;
+public final class DotProblem extends ExactScalarProblem<Vectors> {
 
   /**
    * Makes the problem of multiplying these vectors.
@@ -34,15 +27,18 @@ public final class DotProblem implements Problem<Vectors> {
    *     or NaN
    */
   public DotProblem(Vectors data) {
-    if (data.x().length == 0) {
+    this(data, judgeOf(data.x(), data.y()));
+  }
+
+  private DotProblem(Vectors data, ScalarJudge judge) {
+    super(data, data.x().length, judge, verifiedTraits(data, judge));
+  }
+
+  private static ScalarJudge judgeOf(double[] x, double[] y) {
+    if (x.length == 0) {
       throw new IllegalArgumentException("a dot product needs at least one pair of entries");
     }
-    this.data = data;
-    judge =
-        new ScalarJudge(
-            ExactAccumulator.dot(data.x(), data.y()),
-            ExactAccumulator.absoluteDot(data.x(), data.y()).scalb(1));
-    traits = verifiedTraits(data, judge);
+    return new ScalarJudge(ExactAccumulator.dot(x, y), ExactAccumulator.absoluteDot(x, y).scalb(1));
   }
 
   private static Set<String> verifiedTraits(Vectors data, ScalarJudge judge) {
@@ -65,36 +61,6 @@ public final class DotProblem implements Problem<Vectors> {
     if (safe) {
       verified.add(Trait.NO_UNDERFLOW);
     }
-    return Set.copyOf(verified);
-  }
-
-  @Override
-  public Vectors data() {
-    return data;
-  }
-
-  @Override
-  public int size() {
-    return data.x().length;
-  }
-
-  @Override
-  public Condition condition() {
-    return judge.condition();
-  }
-
-  @Override
-  public Reference reference() {
-    return new ExactReference(judge.exact());
-  }
-
-  @Override
-  public Set<String> traits() {
-    return traits;
-  }
-
-  @Override
-  public Judgement judge(double[] answer) {
-    return judge.judge(answer);
+    return verified;
   }
 }

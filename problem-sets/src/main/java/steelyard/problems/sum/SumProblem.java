@@ -2,11 +2,7 @@ package steelyard.problems.sum;
 
 import java.util.Set;
 import java.util.TreeSet;
-import steelyard.problems.Condition;
-import steelyard.problems.ExactReference;
-import steelyard.problems.Judgement;
-import steelyard.problems.Problem;
-import steelyard.problems.Reference;
+import steelyard.problems.ExactScalarProblem;
 import steelyard.problems.ScalarJudge;
 import steelyard.problems.Trait;
 import steelyard.problems.exact.Dyadic;
@@ -20,10 +16,7 @@ import steelyard.problems.exact.ExactAccumulator;
  * @see <a href="https://doi.org/10.1137/1.9780898718027">Higham, Accuracy and Stability of
  *     Numerical Algorithms, 2nd ed., 2002, Chapter 4</a>
  */
-public final class SumProblem implements Problem<Terms> {
-  private final Terms data;
-  private final ScalarJudge judge;
-  private final Set<String> traits;
+public final class SumProblem extends ExactScalarProblem<Terms> {
 
   /**
    * Makes the problem of adding these terms.
@@ -31,13 +24,18 @@ public final class SumProblem implements Problem<Terms> {
    * @throws IllegalArgumentException if there are none, or one is infinite or NaN
    */
   public SumProblem(Terms data) {
-    double[] terms = data.values();
+    this(data, judgeOf(data.values()));
+  }
+
+  private SumProblem(Terms data, ScalarJudge judge) {
+    super(data, data.values().length, judge, verifiedTraits(data.values(), judge));
+  }
+
+  private static ScalarJudge judgeOf(double[] terms) {
     if (terms.length == 0) {
       throw new IllegalArgumentException("a sum needs at least one term, but there are none");
     }
-    this.data = data;
-    judge = new ScalarJudge(ExactAccumulator.sum(terms), ExactAccumulator.absoluteSum(terms));
-    traits = verifiedTraits(terms, judge);
+    return new ScalarJudge(ExactAccumulator.sum(terms), ExactAccumulator.absoluteSum(terms));
   }
 
   private static Set<String> verifiedTraits(double[] terms, ScalarJudge judge) {
@@ -55,36 +53,6 @@ public final class SumProblem implements Problem<Terms> {
     if (normal) {
       verified.add(Trait.NO_UNDERFLOW);
     }
-    return Set.copyOf(verified);
-  }
-
-  @Override
-  public Terms data() {
-    return data;
-  }
-
-  @Override
-  public int size() {
-    return data.values().length;
-  }
-
-  @Override
-  public Condition condition() {
-    return judge.condition();
-  }
-
-  @Override
-  public Reference reference() {
-    return new ExactReference(judge.exact());
-  }
-
-  @Override
-  public Set<String> traits() {
-    return traits;
-  }
-
-  @Override
-  public Judgement judge(double[] answer) {
-    return judge.judge(answer);
+    return verified;
   }
 }
