@@ -9,9 +9,12 @@ import java.util.OptionalDouble;
  * table.
  *
  * @param family the family, or {@link #ALL_FAMILIES}
- * @param elsewhere on the row over all families of a failed candidate: its grade over the families
- *     on which nothing failed
+ * @param elsewhere on the row over all families: the grade over the families on which the candidate
+ *     is neither failed nor unstable nor weaker, where that leaves some out and some in
  * @param failedFamilies on the same row: the families on which something failed, space-separated
+ * @param unstableFamilies on the same row: the families on which it is unstable, space-separated
+ * @param weakerFamily on the same row: the one other family without which the grade is one of
+ *     k-fold precision
  * @param problems on how many problems the answer was judged
  * @param failureStatuses how often each failing status occurred, such as {@code nan:3 timeout:1}
  */
@@ -22,6 +25,8 @@ public record Verdict(
     Grade grade,
     Optional<Grade> elsewhere,
     Optional<String> failedFamilies,
+    Optional<String> unstableFamilies,
+    Optional<String> weakerFamily,
     int problems,
     int notApplicable,
     int uncertified,

@@ -92,7 +92,7 @@ class GoldenFilesTest {
   }
 
   private static String choice(double error, List<Timing> timings) {
-    Requirement requirement = new Requirement("sum", error, 1e12, 100, List.of());
+    Requirement requirement = new Requirement("sum", error, 1e12, 100, List.of(), List.of());
     Choice choice = Chooser.choose(requirement, SampleRun.observations(), timings);
     String text = ChoiceText.render(choice);
     assertThat(text.lines()).allMatch(line -> line.length() <= ChoiceText.WIDTH);

@@ -2,6 +2,7 @@ package steelyard.harness.cli;
 
 import java.nio.file.Path;
 import java.util.List;
+import java.util.Optional;
 import java.util.concurrent.Callable;
 import picocli.CommandLine;
 import picocli.CommandLine.Command;
@@ -64,17 +65,22 @@ final class ChooseCommand implements Callable<Integer> {
       description = "Only problems of these families; default: all of the run.")
   private List<String> families = List.of();
 
+  @Option(
+      names = "--except",
+      split = ",",
+      paramLabel = "FAMILY",
+      description = "Leave out problems of these families, which cannot occur where you are.")
+  private List<String> except = List.of();
+
   ChooseCommand() {}
 
   @Override
   public Integer call() {
     Run run = RunFolder.read(folder);
-    Choice choice =
-        Chooser.choose(
-            new Requirement(task, error, conditionUpTo, size, families),
-            run.observations(),
-            run.timings());
-    spec.commandLine().getOut().print(ChoiceText.render(choice));
+    Requirement requirement = new Requirement(task, error, conditionUpTo, size, families, except);
+    Choice choice = Chooser.choose(requirement, run.observations(), run.timings());
+    Optional<Choice> spared = Chooser.spared(choice, run.observations(), run.timings());
+    spec.commandLine().getOut().print(ChoiceText.render(choice, spared));
     return choice.qualified().isEmpty() ? ExitCode.FINDING : ExitCode.DONE;
   }
 }

@@ -8,12 +8,12 @@ import picocli.CommandLine.Command;
 import picocli.CommandLine.Parameters;
 import steelyard.algorithms.Candidate;
 import steelyard.harness.data.DoubleText;
-import steelyard.harness.plan.NearestName;
 import steelyard.harness.task.Task;
 import steelyard.harness.task.Tasks;
 import steelyard.problems.Data;
 import steelyard.problems.Family;
 import steelyard.problems.Reach;
+import steelyard.results.text.NearestName;
 
 /** Lists what there is to weigh. */
 @Command(

@@ -47,6 +47,7 @@ record PlanFindings(List<String> lines) {
             requirement.error(),
             requirement.conditionUpTo(),
             requirement.size(),
+            List.of(),
             List.of()),
         run.observations(),
         run.timings());

@@ -5,7 +5,6 @@ import java.util.Collection;
 import java.util.List;
 import java.util.function.Function;
 import steelyard.algorithms.Candidate;
-import steelyard.harness.plan.NearestName;
 import steelyard.harness.plan.PlanException;
 import steelyard.harness.run.Assignment;
 import steelyard.harness.task.Task;
@@ -13,6 +12,7 @@ import steelyard.problems.Data;
 import steelyard.problems.Family;
 import steelyard.problems.Problem;
 import steelyard.problems.ProblemId;
+import steelyard.results.text.NearestName;
 
 /** Finds what is named by id: tasks, families, candidates, problems. */
 public final class Workbench {

@@ -2,6 +2,7 @@ package steelyard.harness.plan;
 
 import java.util.List;
 import java.util.Optional;
+import steelyard.results.text.NearestName;
 
 /**
  * What is to be weighed, with nothing left to a default.

@@ -11,6 +11,7 @@ import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import steelyard.results.text.NearestName;
 
 /** Reads plans, fills in what they leave to a default, and holds them against a catalogue. */
 public final class PlanReader {

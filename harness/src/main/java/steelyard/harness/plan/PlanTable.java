@@ -8,6 +8,7 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
 import java.util.function.Function;
+import steelyard.results.text.NearestName;
 
 /**
  * One table of a plan's TOML, read by key. What has the wrong type or lies out of range is refused

@@ -2,6 +2,7 @@ package steelyard.harness.plan;
 
 import java.util.List;
 import steelyard.harness.data.DoubleText;
+import steelyard.results.text.NearestName;
 
 /**
  * Reads what each family contributes to an entry: its conditions and sizes. A family that the entry

@@ -2,6 +2,7 @@ package steelyard.harness.plan;
 
 import java.util.List;
 import java.util.Optional;
+import steelyard.results.text.NearestName;
 
 /** Reads one {@code [[weigh]]} entry and fills in what it leaves to a default. */
 final class WeighingReader {

@@ -33,6 +33,13 @@ public record Choice(
     return qualified.stream().findFirst().filter(q -> q.timing().isPresent());
   }
 
+  /** Returns the winner, or all that qualify where the fastest is not known. */
+  List<String> leaders() {
+    return winner().isPresent()
+        ? List.of(winner().get().candidate())
+        : qualified.stream().map(Qualified::candidate).toList();
+  }
+
   /** Returns the next fastest candidate that qualifies and was timed. */
   public Optional<Qualified> runnerUp() {
     return qualified.stream().skip(1).findFirst().filter(q -> q.timing().isPresent());

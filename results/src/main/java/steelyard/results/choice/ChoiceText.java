@@ -1,5 +1,6 @@
 package steelyard.results.choice;
 
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
@@ -28,10 +29,15 @@ public final class ChoiceText {
 
   /** Renders a choice. */
   public static String render(Choice choice) {
-    return new ChoiceText(choice).render();
+    return render(choice, Optional.empty());
   }
 
-  private String render() {
+  /** Renders a choice, and says what would be chosen without the families that nearly all fail. */
+  public static String render(Choice choice, Optional<Choice> spared) {
+    return new ChoiceText(choice).text(spared);
+  }
+
+  private String text(Optional<Choice> spared) {
     Requirement need = choice.requirement();
     say(
         "Required of %s at n = %s: forward error at most %s for condition numbers up to %s.",
@@ -48,6 +54,7 @@ public final class ChoiceText {
     }
     out.append('\n');
     decide();
+    spared.ifPresent(this::spare);
     out.append('\n');
     qualified();
     rejected();
@@ -77,6 +84,17 @@ public final class ChoiceText {
                       "Nearest miss: %s with a worst error of %s on %s.",
                       miss.candidate(), e(miss.error().orElseThrow()), miss.problem()));
     }
+  }
+
+  private void spare(Choice other) {
+    List<String> left = new ArrayList<>(other.requirement().except());
+    left.removeAll(choice.requirement().except());
+    long failing =
+        choice.rejected().stream().filter(r -> r.reason() == Rejected.Reason.FAILED).count();
+    String leaders = other.leaders().isEmpty() ? "none" : String.join(", ", other.leaders());
+    say(
+        "Without %s, on which %s: %s. Leave out what cannot occur where you are.",
+        String.join(", ", left), count((int) failing, "candidate") + " failed", leaders);
   }
 
   private void decideFor(Qualified winner) {

@@ -42,6 +42,29 @@ public final class Chooser {
     return chooser.choose(Selection.of(requirement, observations));
   }
 
+  /**
+   * Chooses again without the families on which a candidate failed, since one family that cannot
+   * occur where the kernel is used must not decide.
+   *
+   * @param choice what was chosen with them
+   * @return the other choice, if there is such a family, others are left, and the outcome differs
+   */
+  public static Optional<Choice> spared(
+      Choice choice, List<Observation> observations, List<Timing> timings) {
+    Requirement requirement = choice.requirement();
+    List<String> failing =
+        Selection.of(requirement, observations).rows().stream()
+            .filter(o -> o.status().isFailure())
+            .map(Observation::family)
+            .distinct()
+            .toList();
+    if (failing.isEmpty() || failing.size() == choice.families().size()) {
+      return Optional.empty();
+    }
+    Choice other = choose(requirement.without(failing), observations, timings);
+    return Optional.of(other).filter(o -> !o.leaders().equals(choice.leaders()));
+  }
+
   private Choice choose(Selection selection) {
     Map<String, List<Observation>> byCandidate = new LinkedHashMap<>();
     Set<String> families = new LinkedHashSet<>();

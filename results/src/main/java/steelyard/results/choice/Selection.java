@@ -9,6 +9,7 @@ import java.util.function.Function;
 import java.util.stream.Collectors;
 import steelyard.results.Observation;
 import steelyard.results.table.Scientific;
+import steelyard.results.text.NearestName;
 
 /**
  * The observations that a requirement speaks of.
@@ -30,12 +31,9 @@ record Selection(List<Observation> rows, int unplaced) {
         observations.stream().filter(o -> o.task().equals(requirement.task())).toList();
     Set<String> families = distinct(ofTask, Observation::family);
     requirement.families().forEach(family -> checkName("family", family, families));
+    requirement.except().forEach(family -> checkName("family", family, families));
     List<Observation> ofFamilies =
-        ofTask.stream()
-            .filter(
-                o ->
-                    requirement.families().isEmpty() || requirement.families().contains(o.family()))
-            .toList();
+        ofTask.stream().filter(o -> requirement.counts(o.family())).toList();
     List<Observation> ofSize =
         ofFamilies.stream().filter(o -> o.size() == requirement.size()).toList();
     if (ofSize.isEmpty()) {
@@ -92,7 +90,7 @@ record Selection(List<Observation> rows, int unplaced) {
     if (known.contains(typed)) {
       return;
     }
-    Optional<String> nearest = Nearest.to(typed, known);
+    Optional<String> nearest = NearestName.of(typed, known);
     throw new RequirementException(
         "The run has no "
             + what

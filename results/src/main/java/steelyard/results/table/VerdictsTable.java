@@ -39,7 +39,7 @@ public final class VerdictsTable {
             v -> Optional.of(v.grade().text())),
         choice(
             "verdict_elsewhere",
-            "of a failed candidate over all families: the verdict over those where nothing failed",
+            "over all families: the verdict over those where it is neither failed nor unstable nor weaker",
             false,
             GRADES.texts(),
             v -> v.elsewhere().map(Grade::text)),
@@ -47,6 +47,14 @@ public final class VerdictsTable {
             "failed_families",
             "over all families: those where the candidate failed, separated by spaces",
             Verdict::failedFamilies),
+        note(
+            "unstable_families",
+            "over all families: those where the candidate is unstable, separated by spaces",
+            Verdict::unstableFamilies),
+        note(
+            "weaker_family",
+            "over all families: the one family without which the verdict elsewhere is k-fold",
+            Verdict::weakerFamily),
         integer("problems", "1", "on how many problems the answer was judged", Verdict::problems),
         integer(
             "not_applicable",
@@ -107,6 +115,8 @@ public final class VerdictsTable {
         GRADES.value(cells.text("verdict")),
         cells.note("verdict_elsewhere").map(GRADES::value),
         cells.note("failed_families"),
+        cells.note("unstable_families"),
+        cells.note("weaker_family"),
         cells.integer("problems"),
         cells.integer("not_applicable"),
         cells.integer("uncertified"),

@@ -12,12 +12,19 @@ final class VerdictCell {
 
   private VerdictCell() {}
 
-  /** Returns words such as {@code backward stable; failed on overflow}. */
+  private static final int MOST_NAMED = 4;
+
+  /** Returns words such as {@code backward stable; unstable on wilkinson-growth}. */
   static String text(Verdict verdict) {
     List<String> parts = new ArrayList<>();
     verdict.elsewhere().ifPresent(grade -> parts.add(grade.words()));
-    if (verdict.grade() == Grade.FAILED) {
-      parts.add(failed(verdict));
+    boolean split =
+        verdict.elsewhere().isPresent()
+            || (verdict.failedFamilies().isPresent() && verdict.unstableFamilies().isPresent());
+    if (split) {
+      verdict.weakerFamily().ifPresent(name -> parts.add("less on " + name));
+      verdict.unstableFamilies().ifPresent(names -> parts.add(on(Grade.UNSTABLE, names)));
+      verdict.failedFamilies().ifPresent(names -> parts.add(on(Grade.FAILED, names)));
     } else {
       parts.add(verdict.grade().words());
     }
@@ -25,7 +32,8 @@ final class VerdictCell {
       parts.add(BROKEN + " on " + verdict.boundsBroken());
     }
     if (verdict.notApplicable() > 0 && verdict.grade() != Grade.NOT_APPLICABLE) {
-      parts.add("not for " + verdict.notApplicable());
+      int count = verdict.notApplicable();
+      parts.add("not for " + count + (count == 1 ? " problem" : " problems"));
     }
     if (verdict.uncertified() > 0) {
       parts.add(verdict.uncertified() + " uncertified");
@@ -33,11 +41,10 @@ final class VerdictCell {
     return String.join("; ", parts);
   }
 
-  private static String failed(Verdict verdict) {
-    String where =
-        verdict.elsewhere().isPresent()
-            ? " on " + verdict.failedFamilies().orElse("").replace(" ", ", ")
-            : "";
-    return Grade.FAILED.words() + where;
+  private static String on(Grade grade, String families) {
+    List<String> names = List.of(families.split(" ", -1));
+    return grade.words()
+        + " on "
+        + (names.size() > MOST_NAMED ? names.size() + " families" : String.join(", ", names));
   }
 }

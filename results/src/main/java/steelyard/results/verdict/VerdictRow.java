@@ -1,8 +1,8 @@
 package steelyard.results.verdict;
 
-import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.Comparator;
+import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
@@ -19,42 +19,78 @@ import steelyard.results.Verdict;
 final class VerdictRow {
   private VerdictRow() {}
 
+  /** The families on which a candidate comes to grief, and its grade over the others. */
+  private record Exceptions(
+      Optional<Grade> elsewhere,
+      Optional<String> failed,
+      Optional<String> unstable,
+      Optional<String> weaker) {
+    static final Exceptions NONE =
+        new Exceptions(Optional.empty(), Optional.empty(), Optional.empty(), Optional.empty());
+  }
+
   /** Judges one family. */
   static Verdict of(String family, List<Observation> rows) {
-    return row(family, rows, Optional.empty(), Optional.empty());
+    return row(family, rows, Exceptions.NONE);
   }
 
-  /** Judges all families together, and those on which nothing failed. */
+  /** Judges all families together, and those on which nothing goes wrong. */
   static Verdict ofAll(Map<String, List<Observation>> families) {
-    List<Observation> all = new ArrayList<>();
-    List<Observation> unfailed = new ArrayList<>();
-    List<String> failed = new ArrayList<>();
-    families.forEach(
-        (family, rows) -> {
-          all.addAll(rows);
-          if (Grader.grade(rows) == Grade.FAILED) {
-            failed.add(family);
-          } else {
-            unfailed.addAll(rows);
-          }
-        });
+    Map<String, List<Observation>> settled = new LinkedHashMap<>(families);
+    List<String> failed = take(settled, Grade.FAILED);
+    List<String> unstable = take(settled, Grade.UNSTABLE);
+    Optional<String> weaker = weaker(settled);
+    weaker.ifPresent(settled::remove);
+    boolean split = settled.size() < families.size() && !settled.isEmpty();
     return row(
         Verdict.ALL_FAMILIES,
-        all,
-        failed.isEmpty() || unfailed.isEmpty()
-            ? Optional.empty()
-            : Optional.of(Grader.grade(unfailed)),
-        failed.isEmpty() ? Optional.empty() : Optional.of(String.join(" ", failed)));
+        union(families),
+        new Exceptions(
+            split ? Optional.of(Grader.grade(union(settled))) : Optional.empty(),
+            joined(failed),
+            joined(unstable),
+            weaker));
   }
 
-  private static Verdict row(
-      String family,
-      List<Observation> rows,
-      Optional<Grade> elsewhere,
-      Optional<String> failedFamilies) {
+  private static List<String> take(Map<String, List<Observation>> families, Grade grade) {
+    List<String> taken =
+        families.keySet().stream()
+            .filter(family -> Grader.grade(families.get(family)) == grade)
+            .toList();
+    taken.forEach(families::remove);
+    return taken;
+  }
+
+  /**
+   * Returns the one family that hides the multiple precision which the others prove. A grade of
+   * k-fold precision needs evidence, so that no family is left out for being the hard one.
+   */
+  private static Optional<String> weaker(Map<String, List<Observation>> families) {
+    if (families.size() < 2 || Grader.grade(union(families)).compareTo(Grade.BACKWARD_STABLE) < 0) {
+      return Optional.empty();
+    }
+    for (String family : families.keySet()) {
+      Map<String, List<Observation>> others = new LinkedHashMap<>(families);
+      others.remove(family);
+      if (Grader.grade(union(others)).folds().isPresent()) {
+        return Optional.of(family);
+      }
+    }
+    return Optional.empty();
+  }
+
+  private static List<Observation> union(Map<String, List<Observation>> families) {
+    return families.values().stream().flatMap(List::stream).toList();
+  }
+
+  private static Optional<String> joined(List<String> families) {
+    return families.isEmpty() ? Optional.empty() : Optional.of(String.join(" ", families));
+  }
+
+  private static Verdict row(String family, List<Observation> rows, Exceptions exceptions) {
     Grade grade = Grader.grade(rows);
     ErrorSummary errors = ErrorSummary.of(rows);
-    boolean unstable = grade == Grade.UNSTABLE || elsewhere.equals(Optional.of(Grade.UNSTABLE));
+    boolean unstable = grade == Grade.UNSTABLE || exceptions.unstable().isPresent();
     Optional<Observation> failsFrom = unstable ? failsFrom(rows) : Optional.empty();
     List<BrokenBound> broken = BrokenBound.in(rows);
     int failures = count(rows.stream().filter(o -> o.status().isFailure()).count());
@@ -66,8 +102,10 @@ final class VerdictRow {
         rows.get(0).candidate(),
         family,
         grade,
-        elsewhere,
-        failedFamilies,
+        exceptions.elsewhere(),
+        exceptions.failed(),
+        exceptions.unstable(),
+        exceptions.weaker(),
         judged,
         notApplicable,
         rows.size() - judged - notApplicable - failures,

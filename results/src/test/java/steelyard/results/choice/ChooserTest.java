@@ -15,7 +15,8 @@ import steelyard.results.Timing;
 import steelyard.results.choice.Rejected.Reason;
 
 class ChooserTest {
-  private static final Requirement NEED = new Requirement("sum", 1e-10, 1e6, 100, List.of());
+  private static final Requirement NEED =
+      new Requirement("sum", 1e-10, 1e6, 100, List.of(), List.of());
   private static final Timing FAST = time("fast", 10);
   private static final Timing SLOW = time("slow", 20);
 
@@ -85,7 +86,7 @@ class ChooserTest {
         List.of(
             row("fast", 1e-16),
             new ObservationBuilder().at("sum", "other", "fast").forward(1).build());
-    Requirement narrow = new Requirement("sum", 1e-10, 1e6, 100, List.of("cancelling"));
+    Requirement narrow = new Requirement("sum", 1e-10, 1e6, 100, List.of("cancelling"), List.of());
     assertThat(Chooser.choose(narrow, rows, List.of(FAST)).winner()).isPresent();
     assertThat(choose(rows, List.of(FAST)).winner()).isEmpty();
   }
@@ -169,39 +170,43 @@ class ChooserTest {
   void unknownNamesAndSizes() {
     List<Observation> rows = List.of(row("fast", 1e-16));
     assertRefused(
-        new Requirement("smu", 1, 1e6, 100, List.of()),
+        new Requirement("smu", 1, 1e6, 100, List.of(), List.of()),
         rows,
-        "The run has no task \"smu\"; it has sum.");
+        "The run has no task \"smu\"; perhaps sum is meant; it has sum.");
     assertRefused(
-        new Requirement("sums", 1, 1e6, 100, List.of()),
+        new Requirement("bridge", 1, 1e6, 100, List.of(), List.of()),
+        rows,
+        "The run has no task \"bridge\"; it has sum.");
+    assertRefused(
+        new Requirement("sums", 1, 1e6, 100, List.of(), List.of()),
         rows,
         "The run has no task \"sums\"; perhaps sum is meant; it has sum.");
     assertRefused(
-        new Requirement("sum", 1, 1e6, 100, List.of("canceling")),
+        new Requirement("sum", 1, 1e6, 100, List.of("canceling"), List.of()),
         rows,
         "The run has no family \"canceling\"; perhaps cancelling is meant; it has cancelling.");
     assertRefused(
-        new Requirement("sum", 1, 1e6, 50, List.of()),
+        new Requirement("sum", 1, 1e6, 50, List.of(), List.of()),
         rows,
         "The run has no problem of size 50 for this; choose one of 100.");
     assertRefused(
-        new Requirement("sum", 1, 0.5, 100, List.of()),
+        new Requirement("sum", 1, 0.5, 100, List.of(), List.of()),
         rows,
         "The run has no problem with a condition number up to 5.00000e-01 for this; the smallest is"
             + " 1.00000e+00.");
     assertRefused(
-        new Requirement("sum", 1, 1e6, 100, List.of()),
+        new Requirement("sum", 1, 1e6, 100, List.of(), List.of()),
         List.of(),
         "The run has no task \"sum\"; it has none.");
   }
 
   @Test
   void figuresThatAreNone() {
-    assertThatThrownBy(() -> new Requirement("sum", Double.NaN, 1, 1, List.of()))
+    assertThatThrownBy(() -> new Requirement("sum", Double.NaN, 1, 1, List.of(), List.of()))
         .isInstanceOf(RequirementException.class);
-    assertThatThrownBy(() -> new Requirement("sum", -1, 1, 1, List.of()))
+    assertThatThrownBy(() -> new Requirement("sum", -1, 1, 1, List.of(), List.of()))
         .isInstanceOf(RequirementException.class);
-    assertThatThrownBy(() -> new Requirement("sum", 1, 0, 1, List.of()))
+    assertThatThrownBy(() -> new Requirement("sum", 1, 0, 1, List.of(), List.of()))
         .isInstanceOf(RequirementException.class);
   }
 
@@ -219,6 +224,50 @@ class ChooserTest {
     assertThatThrownBy(() -> Chooser.choose(need, rows, List.of()))
         .isInstanceOf(RequirementException.class)
         .hasMessage(sentence);
+  }
+
+  @Test
+  void aFamilyOnWhichTheFastestFailsIsSparedInASecondChoice() {
+    List<Observation> rows =
+        List.of(
+            row("fast", 1e-12),
+            on("p2", "fast").family("huge").status(Status.INFINITE).build(),
+            row("slow", 1e-12),
+            on("p2", "slow").family("huge").build());
+    Choice choice = choose(rows, List.of(FAST, SLOW));
+    assertThat(choice.leaders()).containsExactly("slow");
+    Choice spared = Chooser.spared(choice, rows, List.of(FAST, SLOW)).orElseThrow();
+    assertThat(spared.leaders()).containsExactly("fast");
+    assertThat(spared.requirement().except()).containsExactly("huge");
+    assertThat(ChoiceText.render(choice, Optional.of(spared)))
+        .contains("DECISION: slow", "Without huge, on which 1 candidate failed: fast.");
+  }
+
+  @Test
+  void nothingIsSparedWhereItWouldChangeNothing() {
+    List<Observation> rows =
+        List.of(
+            row("fast", 1e-12),
+            on("p2", "fast").family("huge").build(),
+            row("slow", 1e-12),
+            on("p2", "slow").family("huge").status(Status.NAN).build());
+    assertThat(Chooser.spared(choose(rows, List.of(FAST, SLOW)), rows, List.of(FAST, SLOW)))
+        .isEmpty();
+    List<Observation> failingEverywhere = List.of(on("p2", "fast").status(Status.NAN).build());
+    assertThat(Chooser.spared(choose(failingEverywhere, List.of()), failingEverywhere, List.of()))
+        .isEmpty();
+  }
+
+  @Test
+  void anExceptedFamilyDoesNotCountAndMustBeKnown() {
+    List<Observation> rows =
+        List.of(row("fast", 1e-12), on("p2", "fast").family("huge").forward(1).build());
+    Requirement without = NEED.without(List.of("huge"));
+    assertThat(Chooser.choose(without, rows, List.of(FAST)).winner()).isPresent();
+    assertThat(choose(rows, List.of(FAST)).winner()).isEmpty();
+    assertThatThrownBy(() -> Chooser.choose(NEED.without(List.of("hugs")), rows, List.of(FAST)))
+        .isInstanceOf(RequirementException.class)
+        .hasMessageContaining("huge");
   }
 
   private static Choice choose(List<Observation> rows, List<Timing> timings) {

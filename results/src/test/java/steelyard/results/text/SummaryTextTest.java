@@ -34,7 +34,8 @@ class SummaryTextTest {
             new ObservationBuilder().build(),
             new ObservationBuilder().repeat(1).status(Status.NOT_APPLICABLE).build(),
             new ObservationBuilder().repeat(2).status(Status.UNCERTIFIED).build());
-    assertThat(render(rows, List.of())).contains("backward stable; not for 1; 1 uncertified");
+    assertThat(render(rows, List.of()))
+        .contains("backward stable; not for 1 problem; 1 uncertified");
   }
 
   @Test

@@ -65,6 +65,44 @@ class VerdictsTest {
   }
 
   @Test
+  void instabilityOnOneFamilyDoesNotHideTheOthers() {
+    List<Observation> rows =
+        List.of(
+            row().family("easy").build(),
+            row().family("growth").condition(1e6).forward(1).backward(1).build());
+    Verdict all = last(rows);
+    assertThat(all.grade()).isEqualTo(Grade.UNSTABLE);
+    assertThat(all.elsewhere()).contains(Grade.BACKWARD_STABLE);
+    assertThat(all.unstableFamilies()).contains("growth");
+    assertThat(all.failedFamilies()).isEmpty();
+    assertThat(all.failsFromCondition()).hasValue(1e6);
+  }
+
+  @Test
+  void oneFamilyDoesNotHideTheDoubledPrecisionThatTheOthersProve() {
+    Observation hard = row().family("hard").condition(1e18).forward(2 * U).build();
+    Observation weak = row().family("weak").condition(10).forward(100 * U).backward(9 * U).build();
+    Observation easy = row().family("easy").condition(1).forward(0).backward(0).build();
+    Verdict all = last(List.of(hard, weak, easy));
+    assertThat(all.grade()).isEqualTo(Grade.BACKWARD_STABLE);
+    assertThat(all.elsewhere()).contains(Grade.TWO_FOLD);
+    assertThat(all.weakerFamily()).contains("weak");
+
+    Verdict without = last(List.of(weak, easy));
+    assertThat(without.weakerFamily()).as("no evidence, no family is left out").isEmpty();
+    assertThat(without.elsewhere()).isEmpty();
+    assertThat(last(List.of(hard, easy)).weakerFamily()).isEmpty();
+  }
+
+  @Test
+  void instabilityEverywhereLeavesNoElsewhere() {
+    Verdict all =
+        last(List.of(row().family("growth").condition(1e6).forward(1).backward(1).build()));
+    assertThat(all.elsewhere()).isEmpty();
+    assertThat(all.unstableFamilies()).contains("growth");
+  }
+
+  @Test
   void aFailureEverywhereLeavesNoElsewhere() {
     Verdict all = last(List.of(row().status(Status.TIMEOUT).condition(7).build()));
     assertThat(all.elsewhere()).isEmpty();

@@ -1,4 +1,4 @@
-package steelyard.harness.plan;
+package steelyard.results.text;
 
 import static org.assertj.core.api.Assertions.assertThat;
 

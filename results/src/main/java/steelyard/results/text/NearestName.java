@@ -1,4 +1,4 @@
-package steelyard.harness.plan;
+package steelyard.results.text;
 
 import java.util.Collection;
 import java.util.Comparator;
