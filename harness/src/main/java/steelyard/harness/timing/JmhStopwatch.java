@@ -23,6 +23,13 @@ import steelyard.harness.plan.TimingEffort;
 /** Measures with JMH in forked JVMs, and reads its result objects. */
 public final class JmhStopwatch implements Stopwatch {
 
+  /**
+   * The forks get nothing of this JVM's own flags. Their heap is touched before anything is timed
+   * and its young part is small: otherwise a candidate that allocates is charged for pages that the
+   * system hands out for the first time, several times its own time.
+   */
+  private static final String[] FORK_FLAGS = {"-Xms256m", "-Xmn64m", "-XX:+AlwaysPreTouch"};
+
   private static final double CONFIDENCE = 0.999;
   private static final String ALLOCATION = "gc.alloc.rate.norm";
 
@@ -54,7 +61,7 @@ public final class JmhStopwatch implements Stopwatch {
   private static Options options(String task, String candidate, Path data, TimingEffort effort) {
     TimeValue iteration = TimeValue.milliseconds(effort.iterationMs());
     return new OptionsBuilder()
-        .jvmArgs()
+        .jvmArgs(FORK_FLAGS)
         .include("^" + KernelBenchmark.class.getName().replace(".", "\\.") + "\\.call$")
         .param("task", task)
         .param("candidate", candidate)
