@@ -2,6 +2,7 @@ package steelyard.results.text;
 
 import java.util.LinkedHashSet;
 import java.util.List;
+import java.util.Map;
 import java.util.Set;
 import java.util.stream.Collectors;
 import steelyard.results.Grade;
@@ -18,6 +19,7 @@ public final class SummaryText {
   private static final String LEGEND =
       """
       worst excess: forward error / (max(condition number, 1) u), the largest seen.
+      fails from \u03BA: where it is unstable, the smallest condition number at which forward stability is violated.
       frontier: on how many families, at the largest size, no candidate is both as accurate and as fast.
       A verdict is evidence from the problems tried, not a proof.
       """;
@@ -40,13 +42,25 @@ public final class SummaryText {
       TaskTimes times = TaskTimes.of(task, timings);
       FrontierCount frontier = FrontierCount.of(task, tradeoffs);
       out.append(task).append(": ").append(times.title()).append('\n');
-      out.append(table(rows, times, frontier, colour)).append('\n');
+      out.append(table(rows, families(task, verdicts), times, frontier, colour)).append('\n');
     }
     return out.append(LEGEND).toString();
   }
 
+  /** Counts the families that each candidate of a task is for. */
+  private static Map<String, Integer> families(String task, List<Verdict> verdicts) {
+    return verdicts.stream()
+        .filter(v -> v.task().equals(task) && !v.spansAllFamilies())
+        .filter(v -> v.grade() != Grade.NOT_APPLICABLE)
+        .collect(Collectors.toMap(Verdict::candidate, v -> 1, Integer::sum));
+  }
+
   private static String table(
-      List<Verdict> rows, TaskTimes times, FrontierCount frontier, boolean colour) {
+      List<Verdict> rows,
+      Map<String, Integer> families,
+      TaskTimes times,
+      FrontierCount frontier,
+      boolean colour) {
     TextTable table =
         new TextTable(
             List.of(
@@ -54,7 +68,7 @@ public final class SummaryText {
                 Heading.text("verdict"),
                 Heading.number("worst excess"),
                 Heading.number("worst backward"),
-                Heading.number("fails from condition"),
+                Heading.number("fails from \u03BA"),
                 Heading.number(times.heading()),
                 Heading.number("x textbook"),
                 Heading.number("frontier")));
@@ -62,7 +76,7 @@ public final class SummaryText {
       table.add(
           List.of(
               v.candidate(),
-              VerdictCell.text(v),
+              VerdictCell.text(v, families.getOrDefault(v.candidate(), 0)),
               Figures.plain(v.worstExcess()),
               Figures.error(v.worstBackwardError()),
               Figures.error(v.failsFromCondition()),
@@ -78,6 +92,6 @@ public final class SummaryText {
     if (verdict.contains(Grade.FAILED.words()) || verdict.contains(VerdictCell.BROKEN)) {
       return "\u001B[31m" + line + "\u001B[0m";
     }
-    return verdict.startsWith(Grade.UNSTABLE.words()) ? "\u001B[33m" + line + "\u001B[0m" : line;
+    return verdict.contains(Grade.UNSTABLE.words()) ? "\u001B[33m" + line + "\u001B[0m" : line;
   }
 }

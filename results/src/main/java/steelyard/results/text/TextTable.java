@@ -81,12 +81,7 @@ public final class TextTable {
   private int[] widths(int maxWidth) {
     int[] widths = new int[headings.size()];
     for (int i = 0; i < widths.length; i++) {
-      String title = headings.get(i).title();
-      // A long title may be broken between its words even where the cells may not be broken.
-      for (String word :
-          title.length() <= NARROWEST ? new String[] {title} : title.split(" ", -1)) {
-        widths[i] = Math.max(widths[i], DisplayWidth.of(word));
-      }
+      widths[i] = titleWidth(headings.get(i).title());
       for (List<String> row : rows) {
         widths[i] = Math.max(widths[i], DisplayWidth.of(row.get(i)));
       }
@@ -95,6 +90,21 @@ public final class TextTable {
       // One column narrower each time, until the table fits or nothing can give way.
     }
     return widths;
+  }
+
+  /** A long title may take two lines even where the cells may not be broken. */
+  private static int titleWidth(String title) {
+    if (title.length() <= NARROWEST) {
+      return DisplayWidth.of(title);
+    }
+    int width = 2;
+    for (String word : title.split(" ", -1)) {
+      width = Math.max(width, DisplayWidth.of(word));
+    }
+    while (Wrap.lines(title, width).size() > 2) {
+      width++;
+    }
+    return width;
   }
 
   private static int total(int[] widths) {

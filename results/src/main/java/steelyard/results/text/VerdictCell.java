@@ -14,8 +14,12 @@ final class VerdictCell {
 
   private static final int MOST_NAMED = 4;
 
-  /** Returns words such as {@code backward stable; unstable on wilkinson-growth}. */
-  static String text(Verdict verdict) {
+  /**
+   * Returns words such as {@code backward stable; unstable on wilkinson-growth}.
+   *
+   * @param families how many families the candidate is for
+   */
+  static String text(Verdict verdict, int families) {
     List<String> parts = new ArrayList<>();
     verdict.elsewhere().ifPresent(grade -> parts.add(grade.words()));
     boolean split =
@@ -23,8 +27,8 @@ final class VerdictCell {
             || (verdict.failedFamilies().isPresent() && verdict.unstableFamilies().isPresent());
     if (split) {
       verdict.weakerFamily().ifPresent(name -> parts.add("less on " + name));
-      verdict.unstableFamilies().ifPresent(names -> parts.add(on(Grade.UNSTABLE, names)));
-      verdict.failedFamilies().ifPresent(names -> parts.add(on(Grade.FAILED, names)));
+      verdict.unstableFamilies().ifPresent(names -> parts.add(on(Grade.UNSTABLE, names, families)));
+      verdict.failedFamilies().ifPresent(names -> parts.add(on(Grade.FAILED, names, families)));
     } else {
       parts.add(verdict.grade().words());
     }
@@ -41,10 +45,12 @@ final class VerdictCell {
     return String.join("; ", parts);
   }
 
-  private static String on(Grade grade, String families) {
-    List<String> names = List.of(families.split(" ", -1));
+  private static String on(Grade grade, String named, int families) {
+    List<String> names = List.of(named.split(" ", -1));
     return grade.words()
         + " on "
-        + (names.size() > MOST_NAMED ? names.size() + " families" : String.join(", ", names));
+        + (names.size() > MOST_NAMED
+            ? names.size() + " of " + families + " families"
+            : String.join(", ", names));
   }
 }

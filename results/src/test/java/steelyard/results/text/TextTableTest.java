@@ -47,6 +47,15 @@ class TextTableTest {
   }
 
   @Test
+  void aLongTitleTakesTwoLinesAndNotThree() {
+    TextTable titled =
+        new TextTable(List.of(Heading.text("name"), Heading.number("fails from condition")));
+    titled.add(List.of("a", "1"));
+    assertThat(titled.render(80))
+        .isEqualTo("name  fails from\n       condition\na              1\n");
+  }
+
+  @Test
   void wordsAreBrokenOnlyWhereTheyAreTooLong() {
     assertThat(Wrap.lines("ab cd efghijk", 5)).containsExactly("ab cd", "efghi", "jk");
     assertThat(Wrap.lines("", 5)).containsExactly("");
