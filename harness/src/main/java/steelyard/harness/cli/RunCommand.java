@@ -3,6 +3,7 @@ package steelyard.harness.cli;
 import java.io.IOException;
 import java.io.PrintWriter;
 import java.nio.file.Path;
+import java.time.Duration;
 import java.time.Instant;
 import java.util.List;
 import java.util.Optional;
@@ -31,6 +32,9 @@ import steelyard.results.text.SummaryText;
     },
     mixinStandardHelpOptions = true)
 final class RunCommand implements Callable<Integer> {
+
+  private static final int MAX_THREADS = 1024;
+  private static final Duration PATIENCE = Duration.ofMinutes(10);
 
   @CommandLine.Spec private CommandLine.Model.CommandSpec spec;
 
@@ -77,7 +81,7 @@ final class RunCommand implements Callable<Integer> {
       Execution execution =
           new PlanExecution(
                   Tasks.all(),
-                  new JmhStopwatch(),
+                  new JmhStopwatch(PATIENCE),
                   workers,
                   new ProgressReport(err, screen.terminal(), System::currentTimeMillis),
                   watch.interruption())
@@ -110,7 +114,7 @@ final class RunCommand implements Callable<Integer> {
               + " calls never returned and kept processors busy, so times may be too high");
     }
     if (!execution.complete()) {
-      err.println("steelyard: interrupted; what was finished is in " + folder);
+      err.println("steelyard: " + execution.shortfall() + "; what was finished is in " + folder);
       return ExitCode.INCOMPLETE;
     }
     return findings.lines().isEmpty() ? ExitCode.DONE : ExitCode.FINDING;
@@ -135,8 +139,6 @@ final class RunCommand implements Callable<Integer> {
     }
     return wanted;
   }
-
-  private static final int MAX_THREADS = 1024;
 
   private static String folderName(String planName) {
     String name = planName.strip().replaceAll("[^A-Za-z0-9._-]+", "-");

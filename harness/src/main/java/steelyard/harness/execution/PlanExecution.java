@@ -15,7 +15,6 @@ import steelyard.harness.task.Task;
 import steelyard.harness.timing.Stopwatch;
 import steelyard.harness.timing.TimingPhase;
 import steelyard.problems.ProblemId;
-import steelyard.results.Timing;
 
 /** Executes a plan: accuracy on all threads first, then times with nothing else running. */
 public final class PlanExecution {
@@ -61,7 +60,7 @@ public final class PlanExecution {
                 plan.problems().stream()
                     .<Assignment<?, ?>>map(cell -> assignment(cell, plan.seed()))
                     .toList());
-    TimingPhase.Outcome timing = new TimingPhase.Outcome(List.<Timing>of(), true);
+    TimingPhase.Outcome timing = TimingPhase.Outcome.NONE;
     Optional<TimingEffort> effort = plan.timing();
     if (effort.isPresent() && !interruption.requested()) {
       TimingJobs jobs = new TimingJobs(workbench, accuracy.observations(), plan.seed());
@@ -73,6 +72,7 @@ public final class PlanExecution {
         accuracy.observations(),
         timing.timings(),
         accuracy.complete() && timing.complete() && !interruption.requested(),
+        timing.busy().orElse("interrupted"),
         accuracy.strayCalls());
   }
 

@@ -4,6 +4,7 @@ import java.io.OutputStream;
 import java.io.PrintStream;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
+import java.time.Duration;
 import java.util.Collection;
 import java.util.OptionalDouble;
 import org.openjdk.jmh.profile.GCProfiler;
@@ -30,24 +31,65 @@ public final class JmhStopwatch implements Stopwatch {
    */
   private static final String[] FORK_FLAGS = {"-Xms256m", "-Xmn64m", "-XX:+AlwaysPreTouch"};
 
+  private static final long PAUSE_MS = 500;
   private static final double CONFIDENCE = 0.999;
   private static final String ALLOCATION = "gc.alloc.rate.norm";
 
-  /** Makes a stopwatch. */
-  public JmhStopwatch() {}
+  private final Duration patience;
+
+  /**
+   * Makes a stopwatch.
+   *
+   * @param patience how long it waits for another timing run on this machine
+   */
+  public JmhStopwatch(Duration patience) {
+    this.patience = patience;
+  }
 
   @Override
   public Score measure(String task, String candidate, Path data, TimingEffort effort)
       throws TimingException {
     try {
-      Collection<RunResult> results =
-          new Runner(options(task, candidate, data, effort), nowhere()).run();
+      Collection<RunResult> results = run(options(task, candidate, data, effort));
       if (results.isEmpty()) {
         throw new TimingException("JMH gave no result", null);
       }
       return score(results.iterator().next());
     } catch (RunnerException failed) {
-      throw new TimingException(sentence(failed), failed);
+      throw new TimingException(
+          "the timed program failed: "
+              + String.valueOf(failed.getMessage()).lines().findFirst().orElse("no reason given"),
+          failed);
+    }
+  }
+
+  /** Waits its turn: JMH lets one run at a time measure on a machine. */
+  private Collection<RunResult> run(Options options) throws RunnerException {
+    long waitedMs = 0;
+    while (true) {
+      try {
+        return new Runner(options, nowhere()).run();
+      } catch (RunnerException failed) {
+        if (!String.valueOf(failed.getMessage()).contains("lock")) {
+          throw failed;
+        }
+        if (waitedMs >= patience.toMillis() || !pause()) {
+          throw new MachineBusyException(
+              "another timing run holds this machine; run again when it is done, or with --no-timing",
+              failed);
+        }
+        waitedMs += PAUSE_MS;
+      }
+    }
+  }
+
+  private static boolean pause() {
+    try {
+      Thread.sleep(PAUSE_MS);
+      return true;
+    } catch (InterruptedException impatient) {
+      Thread.currentThread().interrupt();
+      return false;
     }
   }
 
@@ -92,13 +134,5 @@ public final class JmhStopwatch implements Stopwatch {
   /** A single iteration has no interval; its ends are then the figure itself. */
   private static double finiteOr(double value, double otherwise) {
     return Double.isFinite(value) ? value : otherwise;
-  }
-
-  private static String sentence(RunnerException failed) {
-    String message = String.valueOf(failed.getMessage());
-    if (message.contains("lock")) {
-      return "another timing run is under way on this machine; wait for it, or use --no-timing";
-    }
-    return "the timed program failed: " + message.lines().findFirst().orElse("no reason given");
   }
 }

@@ -40,8 +40,13 @@ public final class TimingPhase {
    *
    * @param timings the rows, in the order of the jobs
    * @param complete whether every candidate was measured or had an obstacle
+   * @param busy why the machine could not be used, if that is why it is incomplete
    */
-  public record Outcome(List<Timing> timings, boolean complete) {}
+  public record Outcome(List<Timing> timings, boolean complete, Optional<String> busy) {
+
+    /** Nothing was to be timed. */
+    public static final Outcome NONE = new Outcome(List.of(), true, Optional.empty());
+  }
 
   /**
    * Times every candidate.
@@ -62,6 +67,8 @@ public final class TimingPhase {
         Map<String, Measured> measured = measure(job, file, done, total);
         done += measured.size();
         rows.addAll(rows(job, measured));
+      } catch (MachineBusyException busy) {
+        return new Outcome(rows, false, Optional.of(busy.getMessage()));
       } finally {
         Files.deleteIfExists(file);
       }
@@ -69,7 +76,7 @@ public final class TimingPhase {
     if (total > 0 && done == total) {
       progress.step(NAME, "", done, total);
     }
-    return new Outcome(rows, done == total);
+    return new Outcome(rows, done == total, Optional.empty());
   }
 
   private record Measured(Optional<Score> score, String detail) {}

@@ -4,6 +4,7 @@ import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.assertThatThrownBy;
 
 import java.nio.file.Path;
+import java.time.Duration;
 import java.util.Arrays;
 import java.util.List;
 import org.junit.jupiter.api.BeforeEach;
@@ -31,19 +32,20 @@ final class JmhStopwatchTest {
 
   @Test
   void aFigureComesWithItsIntervalAndAllocation() throws TimingException {
-    Score lean = new JmhStopwatch().measure("sum", "recursive", input, SHORTEST);
+    Score lean = new JmhStopwatch(Duration.ZERO).measure("sum", "recursive", input, SHORTEST);
     assertThat(lean.ns()).isPositive();
     assertThat(lean.lowNs()).isBetween(0.0, lean.ns());
     assertThat(lean.highNs()).isGreaterThanOrEqualTo(lean.ns());
 
-    Score wasteful = new JmhStopwatch().measure("sum", "big-decimal", input, SHORTEST);
+    Score wasteful = new JmhStopwatch(Duration.ZERO).measure("sum", "big-decimal", input, SHORTEST);
     assertThat(wasteful.allocatedBytes().orElseThrow()).isGreaterThan(1000);
   }
 
   @Test
   void aForkThatFailsIsOneSentence() {
     Path missing = directory.resolve("missing.bin");
-    assertThatThrownBy(() -> new JmhStopwatch().measure("sum", "recursive", missing, SHORTEST))
+    assertThatThrownBy(
+            () -> new JmhStopwatch(Duration.ZERO).measure("sum", "recursive", missing, SHORTEST))
         .isInstanceOf(TimingException.class)
         .hasMessageStartingWith("the timed program failed");
   }

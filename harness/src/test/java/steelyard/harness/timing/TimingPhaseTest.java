@@ -67,6 +67,20 @@ final class TimingPhaseTest {
   }
 
   @Test
+  void aBusyMachineLeavesThePhaseIncompleteAndSaysWhy() throws IOException {
+    Stopwatch stopwatch =
+        (task, candidate, data, effort) -> {
+          throw new MachineBusyException("somebody else is measuring", null);
+        };
+    TimingPhase.Outcome outcome =
+        new TimingPhase(stopwatch, EFFORT, Progress.SILENT, new Interruption())
+            .run(List.of(job(entry("recursive"))));
+    assertThat(outcome.complete()).isFalse();
+    assertThat(outcome.busy()).contains("somebody else is measuring");
+    assertThat(outcome.timings()).isEmpty();
+  }
+
+  @Test
   void withoutTheTextbookCandidateThereIsNoRatio() throws IOException {
     Map<String, Score> scores = Map.of("dot2", new Score(300, 250, 400, OptionalDouble.empty()));
     Timing row = run(scores, entry("dot2")).timings().get(0);
