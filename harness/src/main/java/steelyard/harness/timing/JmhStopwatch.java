@@ -25,11 +25,14 @@ import steelyard.harness.plan.TimingEffort;
 public final class JmhStopwatch implements Stopwatch {
 
   /**
-   * The forks get nothing of this JVM's own flags. Their heap is touched before anything is timed
-   * and its young part is small: otherwise a candidate that allocates is charged for pages that the
-   * system hands out for the first time, several times its own time.
+   * The forks get nothing of this JVM's own flags. Their heap is touched before anything is timed,
+   * its young part is small, and its collector has no threads of its own and does not resize it:
+   * otherwise a candidate that allocates is charged for pages that the system hands out for the
+   * first time, several times its own time on a virtual machine.
    */
-  private static final String[] FORK_FLAGS = {"-Xms256m", "-Xmn64m", "-XX:+AlwaysPreTouch"};
+  private static final String[] FORK_FLAGS = {
+    "-XX:+UseSerialGC", "-Xms96m", "-Xmn32m", "-XX:+AlwaysPreTouch"
+  };
 
   private static final long PAUSE_MS = 500;
   private static final double CONFIDENCE = 0.999;
