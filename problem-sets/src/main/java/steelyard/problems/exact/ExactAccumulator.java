@@ -178,7 +178,55 @@ public final class ExactAccumulator {
 
   /** Returns the number correctly rounded, as {@link Dyadic#doubleValue()} does. */
   public double round() {
-    return value().doubleValue();
+    passCarries();
+    int bottom = 0;
+    while (bottom < CHUNKS - 1 && chunks[bottom] == 0) {
+      bottom++;
+    }
+    boolean negative = chunks[CHUNKS - 1] < 0;
+    int top = CHUNKS - 1;
+    while (top > bottom && magnitude(top, bottom, negative) == 0) {
+      top--;
+    }
+    long leading = magnitude(top, bottom, negative);
+    if (leading > CHUNK_MASK) {
+      return negative ? Double.NEGATIVE_INFINITY : Double.POSITIVE_INFINITY;
+    }
+    if (leading == 0) {
+      return 0;
+    }
+    // The leading 64 bits of the magnitude, the lowest of them set if anything is left below.
+    int lost = Long.numberOfLeadingZeros(leading) - CHUNK_BITS;
+    long second = top > 0 ? magnitude(top - 1, bottom, negative) : 0;
+    long third = top > 1 ? magnitude(top - 2, bottom, negative) : 0;
+    long window = (leading << CHUNK_BITS | second) << lost | third >>> (CHUNK_BITS - lost);
+    boolean isCut = (third << lost & CHUNK_MASK) != 0 || bottom < top - 2;
+    int exponent = top * CHUNK_BITS + LOWEST_EXPONENT - CHUNK_BITS - lost;
+    double rounded = rounded(isCut ? window | 1 : window, exponent);
+    return negative ? -rounded : rounded;
+  }
+
+  // A chunk of the absolute value, after carries were passed: a negative number's chunks are those
+  // of its complement.
+  private long magnitude(int chunk, int bottom, boolean negative) {
+    if (!negative || chunk < bottom) {
+      return chunks[chunk];
+    }
+    long complement = chunk == bottom ? -chunks[chunk] : -1 - chunks[chunk];
+    return chunk == CHUNKS - 1 ? complement : complement & CHUNK_MASK;
+  }
+
+  // The double nearest to a number of 64 bits, the highest one set, times a power of two.
+  private static double rounded(long window, int exponent) {
+    int dropped = Math.max(Long.SIZE - Binary64.PRECISION, Binary64.LEAST_EXPONENT - exponent);
+    if (dropped > Long.SIZE) {
+      return 0;
+    }
+    long kept = dropped == Long.SIZE ? 0 : window >>> dropped;
+    long half = 1L << (dropped - 1);
+    long rest = window & (half | (half - 1));
+    boolean up = Long.compareUnsigned(rest, half) > 0 || (rest == half && (kept & 1) == 1);
+    return Math.scalb((double) (up ? kept + 1 : kept), exponent + dropped);
   }
 
   /** Makes the number zero again. */

@@ -31,7 +31,7 @@ final class Calibration {
     double smallestRatio = Double.POSITIVE_INFINITY;
     for (int trial = 0; trial < LARGEST_TRIALS; trial++) {
       LinearSystem system = generator.apply(parameter);
-      double achieved = ConditionEstimate.of(system.a(), system.b());
+      double achieved = shortened(ConditionEstimate.of(system.a(), system.b()));
       double ratio = Math.max(achieved / target, target / achieved);
       if (best == null || ratio < smallestRatio) {
         best = system;
@@ -49,5 +49,12 @@ final class Calibration {
       parameter = next > low && next < high ? next : Math.sqrt(low) * Math.sqrt(high);
     }
     return best;
+  }
+
+  // To 21 significant bits, so that how the estimate was rounded does not decide which problem is
+  // made.
+  private static double shortened(double estimate) {
+    long half = 1L << 31;
+    return Double.longBitsToDouble(Double.doubleToLongBits(estimate) + half & -2 * half);
   }
 }

@@ -15,7 +15,7 @@ final class SpectrumFamilies {
       "N. J. Higham, Accuracy and Stability of Numerical Algorithms, 2nd ed., SIAM 2002, section"
           + " 28.3; orthogonal factors: G. W. Stewart, SIAM J. Numer. Anal. 17 (1980), 403-409";
   private static final String KNOB = "the ratio of the largest to the smallest singular value";
-  private static final int LARGEST_SIZE = 400;
+  private static final int LARGEST_SIZE = 1000;
 
   // Rounding the entries changes the eigenvalues by about sqrt(n) u times the largest, so that the
   // smallest survives with room to spare.

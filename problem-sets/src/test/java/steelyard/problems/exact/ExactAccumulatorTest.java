@@ -100,6 +100,23 @@ class ExactAccumulatorTest {
     assertThat(accumulator.value()).isEqualTo(once.scalb(62));
   }
 
+  /**
+   * Rounding goes by the chunks, and must agree with that of the exact value on ties and beyond.
+   */
+  @Test
+  void roundsAsItsExactValueDoes() {
+    RandomDoubles doubles = new RandomDoubles(3);
+    for (int i = 0; i < 20_000; i++) {
+      ExactAccumulator accumulator = new ExactAccumulator();
+      for (double term : doubles.array(1 + doubles.below(3))) {
+        accumulator.add(term);
+        accumulator.add(Math.scalb(term, -53 - doubles.below(60)));
+        accumulator.addProduct(term, Math.scalb(1.0, -53 - doubles.below(3)));
+      }
+      assertThat(accumulator.round()).isEqualTo(accumulator.value().doubleValue());
+    }
+  }
+
   @Test
   void refusesWhatIsNotFinite() {
     ExactAccumulator accumulator = new ExactAccumulator();

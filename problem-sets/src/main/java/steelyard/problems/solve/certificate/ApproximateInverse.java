@@ -1,7 +1,5 @@
 package steelyard.problems.solve.certificate;
 
-import steelyard.problems.exact.Dyadic;
-
 /**
  * An approximate inverse R of a scaled matrix A, and the proof of how good it is. This is all that
  * {@link InverseBounds} and {@link Refinement} know of an arithmetic.
@@ -22,9 +20,14 @@ interface ApproximateInverse {
    */
   double[] magnitudes();
 
+  /** Returns how many doubles, of which the sum is meant, stand for a number in this arithmetic. */
+  int parts();
+
   /**
-   * Returns R v approximately, in this arithmetic, as vectors of doubles of which the sum is meant.
-   * Nothing is claimed of its accuracy.
+   * Returns R v approximately. Nothing is claimed of its accuracy.
+   *
+   * @param v as many vectors as a number has parts
+   * @return as many vectors
    */
-  double[][] times(Dyadic[] v);
+  double[][] times(double[][] v);
 }

@@ -41,6 +41,11 @@ record BoundedSolution(Dyadic[] values, double[] radii, Enclosure norm, double r
     Dyadic[] candidate = new Dyadic[near.values.length];
     for (int i = 0; i < candidate.length; i++) {
       candidate[i] = rounded(near.values[i], largest - EXACT_BITS);
+      // Farther away than the solution is known to be.
+      Dyadic distance = candidate[i].subtract(near.values[i]).abs();
+      if (near.radii[i] < distance.doubleValue() / 2) {
+        return Optional.empty();
+      }
     }
     return Residual.isZero(system, candidate)
         ? Optional.of(of(system, candidate, new double[candidate.length]))

@@ -2,7 +2,6 @@ package steelyard.problems.solve.certificate;
 
 import java.util.List;
 import steelyard.problems.UncertifiedException;
-import steelyard.problems.exact.Dyadic;
 
 /**
  * An estimate of the normwise condition number without any proof, for the calibration of
@@ -41,10 +40,8 @@ public final class ConditionEstimate {
   private static double kappa(ScaledSystem system, ApproximateInverse inverse) {
     int n = system.size;
     double[] magnitudes = inverse.magnitudes();
-    Dyadic[] b = new Dyadic[n];
-    for (int i = 0; i < n; i++) {
-      b[i] = Dyadic.of(system.rightHandSide[i]);
-    }
+    double[][] b = new double[inverse.parts()][n];
+    b[0] = system.rightHandSide;
     double[] x = inverse.times(b)[0];
     double inverseNorm = 0;
     double matrixNorm = 0;

@@ -2,7 +2,6 @@ package steelyard.problems.solve.certificate;
 
 import java.util.Arrays;
 import java.util.Optional;
-import steelyard.problems.exact.Dyadic;
 import steelyard.problems.exact.ErrorFree;
 
 /**
@@ -29,6 +28,7 @@ import steelyard.problems.exact.ErrorFree;
 final class DoubleDoubleInverse implements ApproximateInverse {
   private final int size;
   private final double[] matrix;
+  private final double[][] rows;
   private final double[] high;
   private final double[] low;
 
@@ -36,6 +36,7 @@ final class DoubleDoubleInverse implements ApproximateInverse {
   DoubleDoubleInverse(ScaledSystem system, double[] high, double[] low) {
     size = system.size;
     matrix = system.matrix;
+    rows = system.rows();
     this.high = high;
     this.low = low;
     for (int i = 0; i < high.length; i++) {
@@ -69,7 +70,7 @@ final class DoubleDoubleInverse implements ApproximateInverse {
 
   @Override
   public double[] residualRowSums() {
-    double[] rowSums = DoubleInverse.absoluteRowSums(size, matrix);
+    double[] rowSums = DoubleInverse.absoluteRowSums(rows);
     double[] sum = new double[size];
     double[] errors = new double[size];
     double[] bounds = new double[size];
@@ -118,18 +119,19 @@ final class DoubleDoubleInverse implements ApproximateInverse {
   }
 
   @Override
-  public double[][] times(Dyadic[] v) {
-    DoubleDouble[] rounded = new DoubleDouble[size];
+  public int parts() {
+    return 2;
+  }
+
+  @Override
+  public double[][] times(double[][] v) {
     double[][] product = new double[2][size];
-    for (int j = 0; j < size; j++) {
-      double leading = v[j].doubleValue();
-      rounded[j] = new DoubleDouble(leading, v[j].subtract(Dyadic.of(leading)).doubleValue());
-    }
     for (int i = 0; i < size; i++) {
       DoubleDouble sum = DoubleDouble.of(0);
       for (int j = 0; j < size; j++) {
         int at = i * size + j;
-        sum = sum.plus(new DoubleDouble(high[at], low[at]).times(rounded[j]));
+        sum =
+            sum.plus(new DoubleDouble(high[at], low[at]).times(new DoubleDouble(v[0][j], v[1][j])));
       }
       product[0][i] = sum.high();
       product[1][i] = sum.low();

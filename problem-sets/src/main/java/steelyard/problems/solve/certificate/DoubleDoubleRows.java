@@ -43,20 +43,28 @@ final class DoubleDoubleRows implements Rows {
   }
 
   @Override
-  public void normalize(int k) {
+  public void eliminate(int k, int from, int to) {
+    normalize(k, from, to);
+    for (int i = 0; i < size; i++) {
+      if (i != k) {
+        eliminate(i, k, from, to);
+      }
+    }
+  }
+
+  private void normalize(int k, int from, int to) {
     int pivotAt = k * size + k;
     DoubleDouble pivot = new DoubleDouble(high[pivotAt], low[pivotAt]);
     high[pivotAt] = 1;
     low[pivotAt] = 0;
-    for (int j = k * size; j < (k + 1) * size; j++) {
+    for (int j = k * size + from; j < k * size + to; j++) {
       DoubleDouble quotient = new DoubleDouble(high[j], low[j]).dividedBy(pivot);
       high[j] = quotient.high();
       low[j] = quotient.low();
     }
   }
 
-  @Override
-  public void eliminate(int i, int k) {
+  private void eliminate(int i, int k, int from, int to) {
     double factorHigh = high[i * size + k];
     double factorLow = low[i * size + k];
     if (factorHigh == 0) {
@@ -66,7 +74,7 @@ final class DoubleDoubleRows implements Rows {
     low[i * size + k] = 0;
     int target = i * size;
     int source = k * size;
-    for (int j = 0; j < size; j++) {
+    for (int j = from; j < to; j++) {
       double x = high[source + j];
       double product = factorHigh * x;
       double productLow =

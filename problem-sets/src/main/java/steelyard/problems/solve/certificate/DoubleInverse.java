@@ -1,8 +1,6 @@
 package steelyard.problems.solve.certificate;
 
-import java.util.Arrays;
 import java.util.Optional;
-import steelyard.problems.exact.Dyadic;
 
 /**
  * An approximate inverse in double.
@@ -18,12 +16,12 @@ import steelyard.problems.exact.Dyadic;
  */
 final class DoubleInverse implements ApproximateInverse {
   private final int size;
-  private final double[] matrix;
-  private final double[] inverse;
+  private final double[][] matrix;
+  private final double[][] inverse;
 
-  DoubleInverse(ScaledSystem system, double[] inverse) {
+  DoubleInverse(ScaledSystem system, double[][] inverse) {
     size = system.size;
-    matrix = system.matrix;
+    matrix = system.rows();
     this.inverse = inverse;
   }
 
@@ -36,8 +34,8 @@ final class DoubleInverse implements ApproximateInverse {
 
     @Override
     public Optional<ApproximateInverse> invert(ScaledSystem system) {
-      double[] inverse = system.matrix.clone();
-      return GaussJordan.invert(new DoubleRows(system.size, inverse))
+      double[][] inverse = system.rows();
+      return GaussJordan.invert(new DoubleRows(inverse))
           ? Optional.of(new DoubleInverse(system, inverse))
           : Optional.empty();
     }
@@ -50,23 +48,18 @@ final class DoubleInverse implements ApproximateInverse {
 
   @Override
   public double[] residualRowSums() {
-    double[] rowSums = absoluteRowSums(size, matrix);
+    double[] rowSums = absoluteRowSums(matrix);
+    double[][] product = new double[size][size];
+    ProductRows.multiply(inverse, matrix, product);
     double[] bounds = new double[size];
-    double[] product = new double[size];
     for (int i = 0; i < size; i++) {
-      Arrays.fill(product, 0);
       double magnitude = 0;
       for (int k = 0; k < size; k++) {
-        double r = inverse[i * size + k];
-        magnitude += Math.abs(r) * rowSums[k];
-        int row = k * size;
-        for (int j = 0; j < size; j++) {
-          product[j] += r * matrix[row + j];
-        }
+        magnitude += Math.abs(inverse[i][k]) * rowSums[k];
       }
-      product[i] -= 1;
+      product[i][i] -= 1;
       double distance = 0;
-      for (double entry : product) {
+      for (double entry : product[i]) {
         distance += Math.abs(entry);
       }
       bounds[i] =
@@ -79,33 +72,36 @@ final class DoubleInverse implements ApproximateInverse {
 
   @Override
   public double[] magnitudes() {
-    double[] magnitudes = new double[inverse.length];
-    for (int i = 0; i < inverse.length; i++) {
-      magnitudes[i] = Math.abs(inverse[i]);
+    double[] magnitudes = new double[size * size];
+    for (int i = 0; i < size; i++) {
+      for (int j = 0; j < size; j++) {
+        magnitudes[i * size + j] = Math.abs(inverse[i][j]);
+      }
     }
     return magnitudes;
   }
 
   @Override
-  public double[][] times(Dyadic[] v) {
-    double[] rounded = new double[size];
+  public int parts() {
+    return 1;
+  }
+
+  @Override
+  public double[][] times(double[][] v) {
     double[] product = new double[size];
-    for (int j = 0; j < size; j++) {
-      rounded[j] = v[j].doubleValue();
-    }
     for (int i = 0; i < size; i++) {
       for (int j = 0; j < size; j++) {
-        product[i] += inverse[i * size + j] * rounded[j];
+        product[i] += inverse[i][j] * v[0][j];
       }
     }
     return new double[][] {product};
   }
 
-  static double[] absoluteRowSums(int size, double[] entries) {
-    double[] sums = new double[size];
-    for (int i = 0; i < size; i++) {
-      for (int j = 0; j < size; j++) {
-        sums[i] += Math.abs(entries[i * size + j]);
+  static double[] absoluteRowSums(double[][] rows) {
+    double[] sums = new double[rows.length];
+    for (int i = 0; i < sums.length; i++) {
+      for (double entry : rows[i]) {
+        sums[i] += Math.abs(entry);
       }
     }
     return sums;

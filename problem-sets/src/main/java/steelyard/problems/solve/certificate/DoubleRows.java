@@ -1,66 +1,100 @@
 package steelyard.problems.solve.certificate;
 
-/** A matrix of doubles, row by row in one array. */
-final class DoubleRows implements Rows {
-  private final int size;
-  private final double[] entries;
+import java.util.Arrays;
 
-  /** Makes one that changes the given array. */
-  DoubleRows(int size, double[] entries) {
-    this.size = size;
-    this.entries = entries;
+/** A matrix of doubles. Panels are narrow, so that each pass over the rows does several steps. */
+final class DoubleRows implements Rows {
+  private static final int PANEL_WIDTH = 4;
+
+  private final double[][] rows;
+
+  /** Makes one that changes the given rows. */
+  DoubleRows(double[][] rows) {
+    this.rows = rows;
   }
 
   @Override
   public int size() {
-    return size;
+    return rows.length;
+  }
+
+  @Override
+  public int panelWidth() {
+    return PANEL_WIDTH;
   }
 
   @Override
   public double magnitude(int row, int column) {
-    return Math.abs(entries[row * size + column]);
+    return Math.abs(rows[row][column]);
   }
 
   @Override
   public void swapRows(int first, int second) {
-    for (int j = 0; j < size; j++) {
-      swap(first * size + j, second * size + j);
-    }
+    double[] kept = rows[first];
+    rows[first] = rows[second];
+    rows[second] = kept;
   }
 
   @Override
   public void swapColumns(int first, int second) {
-    for (int i = 0; i < size; i++) {
-      swap(i * size + first, i * size + second);
+    for (double[] row : rows) {
+      double kept = row[first];
+      row[first] = row[second];
+      row[second] = kept;
     }
   }
 
   @Override
-  public void normalize(int k) {
-    double pivot = entries[k * size + k];
-    entries[k * size + k] = 1;
-    for (int j = k * size; j < (k + 1) * size; j++) {
-      entries[j] /= pivot;
+  public void eliminate(int k, int from, int to) {
+    double[] pivotRow = rows[k];
+    double pivot = pivotRow[k];
+    pivotRow[k] = 1;
+    for (int j = from; j < to; j++) {
+      pivotRow[j] /= pivot;
+    }
+    for (double[] row : rows) {
+      double factor = row[k];
+      if (row != pivotRow && factor != 0) {
+        row[k] = 0;
+        for (int j = from; j < to; j++) {
+          row[j] -= factor * pivotRow[j];
+        }
+      }
     }
   }
 
+  // Inside the panel now stand the columns of the matrix by which its steps multiplied from the
+  // left, apart from those of the identity. Outside, every row therefore gains a combination of
+  // the panel's rows, and these themselves are replaced by one.
   @Override
-  public void eliminate(int i, int k) {
-    double factor = entries[i * size + k];
-    if (factor == 0) {
-      return;
+  public void finish(int from, int to) {
+    double[][] panel = new double[PANEL_WIDTH][size()];
+    for (int k = from; k < to; k++) {
+      panel[k - from] = rows[k].clone();
     }
-    entries[i * size + k] = 0;
-    int target = i * size;
-    int source = k * size;
-    for (int j = 0; j < size; j++) {
-      entries[target + j] -= factor * entries[source + j];
+    double[] factors = new double[PANEL_WIDTH];
+    for (int i = 0; i < size(); i++) {
+      double[] row = rows[i];
+      System.arraycopy(row, from, factors, 0, to - from);
+      if (from <= i && i < to) {
+        Arrays.fill(row, 0);
+      }
+      combine(row, factors, panel);
+      System.arraycopy(factors, 0, row, from, to - from);
     }
   }
 
-  private void swap(int first, int second) {
-    double kept = entries[first];
-    entries[first] = entries[second];
-    entries[second] = kept;
+  private static void combine(double[] row, double[] factors, double[][] panel) {
+    double f0 = factors[0];
+    double f1 = factors[1];
+    double f2 = factors[2];
+    double f3 = factors[3];
+    double[] p0 = panel[0];
+    double[] p1 = panel[1];
+    double[] p2 = panel[2];
+    double[] p3 = panel[3];
+    for (int j = 0; j < row.length; j++) {
+      row[j] += f0 * p0[j] + f1 * p1[j] + (f2 * p2[j] + f3 * p3[j]);
+    }
   }
 }

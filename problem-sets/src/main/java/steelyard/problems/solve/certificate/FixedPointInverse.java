@@ -93,7 +93,19 @@ final class FixedPointInverse implements ApproximateInverse {
   }
 
   @Override
-  public double[][] times(Dyadic[] v) {
+  public int parts() {
+    return PARTS;
+  }
+
+  @Override
+  public double[][] times(double[][] parts) {
+    Dyadic[] v = new Dyadic[size];
+    for (int j = 0; j < size; j++) {
+      v[j] = Dyadic.ZERO;
+      for (double[] part : parts) {
+        v[j] = v[j].add(Dyadic.of(part[j]));
+      }
+    }
     int exponent = Integer.MAX_VALUE;
     for (Dyadic entry : v) {
       exponent = entry.signum() == 0 ? exponent : Math.min(exponent, entry.exponent());

@@ -40,16 +40,24 @@ final class FixedPointRows implements Rows {
   }
 
   @Override
-  public void normalize(int k) {
+  public void eliminate(int k, int from, int to) {
+    normalize(k, from, to);
+    for (int i = 0; i < size; i++) {
+      if (i != k) {
+        eliminate(i, k, from, to);
+      }
+    }
+  }
+
+  private void normalize(int k, int from, int to) {
     BigInteger pivot = entries[k * size + k];
     entries[k * size + k] = BigInteger.ONE.shiftLeft(fractionBits);
-    for (int j = k * size; j < (k + 1) * size; j++) {
+    for (int j = k * size + from; j < k * size + to; j++) {
       entries[j] = entries[j].shiftLeft(fractionBits).divide(pivot);
     }
   }
 
-  @Override
-  public void eliminate(int i, int k) {
+  private void eliminate(int i, int k, int from, int to) {
     BigInteger factor = entries[i * size + k];
     if (factor.signum() == 0) {
       return;
@@ -57,7 +65,7 @@ final class FixedPointRows implements Rows {
     entries[i * size + k] = BigInteger.ZERO;
     int target = i * size;
     int source = k * size;
-    for (int j = 0; j < size; j++) {
+    for (int j = from; j < to; j++) {
       BigInteger x = entries[source + j];
       if (x.signum() != 0) {
         entries[target + j] =

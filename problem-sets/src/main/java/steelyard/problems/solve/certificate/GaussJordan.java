@@ -16,21 +16,20 @@ final class GaussJordan {
   static boolean invert(Rows rows) {
     int n = rows.size();
     int[] pivotRow = new int[n];
-    for (int k = 0; k < n; k++) {
-      pivotRow[k] = largest(rows, k);
-      double pivot = rows.magnitude(pivotRow[k], k);
-      if (!(pivot > 0 && pivot < Double.POSITIVE_INFINITY)) {
-        return false;
-      }
-      if (pivotRow[k] != k) {
-        rows.swapRows(k, pivotRow[k]);
-      }
-      rows.normalize(k);
-      for (int i = 0; i < n; i++) {
-        if (i != k) {
-          rows.eliminate(i, k);
+    for (int from = 0; from < n; from += rows.panelWidth()) {
+      int to = Math.min(n, from + rows.panelWidth());
+      for (int k = from; k < to; k++) {
+        pivotRow[k] = largest(rows, k);
+        double pivot = rows.magnitude(pivotRow[k], k);
+        if (!(pivot > 0 && pivot < Double.POSITIVE_INFINITY)) {
+          return false;
         }
+        if (pivotRow[k] != k) {
+          rows.swapRows(k, pivotRow[k]);
+        }
+        rows.eliminate(k, from, to);
       }
+      rows.finish(from, to);
     }
     // The inverse of P A is that of A times the inverse of P, which permutes columns.
     for (int k = n - 1; k >= 0; k--) {

@@ -36,6 +36,27 @@ final class Residual {
     return Arrays.stream(accumulators).map(ExactAccumulator::value).toArray(Dyadic[]::new);
   }
 
+  /**
+   * Returns the numbers that the accumulators hold, rounded to unevaluated sums of doubles.
+   *
+   * @param count how many doubles each; the last may underflow
+   */
+  static double[][] parts(ExactAccumulator[] accumulators, int count) {
+    double[][] parts = new double[count][accumulators.length];
+    for (int i = 0; i < accumulators.length; i++) {
+      for (int part = 0; part < count; part++) {
+        parts[part][i] = accumulators[i].round();
+        if (part < count - 1) {
+          accumulators[i].add(-parts[part][i]);
+        }
+      }
+      for (int part = 0; part < count - 1; part++) {
+        accumulators[i].add(parts[part][i]);
+      }
+    }
+    return parts;
+  }
+
   /** Returns whether x̃ solves the system exactly. */
   static boolean isZero(ScaledSystem system, Dyadic[] x) {
     ExactAccumulator[] residual = start(system);

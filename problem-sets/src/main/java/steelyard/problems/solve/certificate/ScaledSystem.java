@@ -50,6 +50,15 @@ final class ScaledSystem {
     }
   }
 
+  /** Returns the scaled matrix, as rows of its own. */
+  double[][] rows() {
+    double[][] rows = new double[size][];
+    for (int i = 0; i < size; i++) {
+      rows[i] = Arrays.copyOfRange(matrix, i * size, (i + 1) * size);
+    }
+    return rows;
+  }
+
   /** Returns the least m with |x| &lt; 2^m; the least int for zero. */
   static int magnitude(double x) {
     if (x == 0) {
@@ -115,12 +124,19 @@ final class ScaledSystem {
   }
 
   private static double scaled(double x, int shift) {
-    double y = Math.scalb(x, shift);
-    if (Math.scalb(y, -shift) != x) {
+    double y = timesPowerOfTwo(x, shift);
+    if (timesPowerOfTwo(y, -shift) != x) {
       throw new UncertifiedException(
           "the entries span so many powers of two that they cannot be scaled to the size of 1 "
               + "without rounding");
     }
     return y;
+  }
+
+  // Math.scalb for the shifts that are common, at the price of a product.
+  private static double timesPowerOfTwo(double x, int shift) {
+    return Math.abs(shift) < Double.MAX_EXPONENT
+        ? x * Double.longBitsToDouble((long) (shift + Double.MAX_EXPONENT) << 52)
+        : Math.scalb(x, shift);
   }
 }

@@ -29,7 +29,12 @@ class CertificateTest {
     }
 
     @Override
-    public double[][] times(Dyadic[] v) {
+    public int parts() {
+      return original.parts();
+    }
+
+    @Override
+    public double[][] times(double[][] v) {
       double[][] product = original.times(v);
       for (double[] part : product) {
         Arrays.setAll(part, i -> factor * part[i]);

@@ -26,7 +26,12 @@ class InverseBoundsTest {
     }
 
     @Override
-    public double[][] times(Dyadic[] v) {
+    public int parts() {
+      return 1;
+    }
+
+    @Override
+    public double[][] times(double[][] v) {
       throw new UnsupportedOperationException();
     }
   }
