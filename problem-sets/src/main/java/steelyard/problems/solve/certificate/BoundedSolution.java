@@ -52,7 +52,8 @@ record BoundedSolution(Dyadic[] values, double[] radii, Enclosure norm, double r
         : Optional.empty();
   }
 
-  private static BoundedSolution of(ScaledSystem system, Dyadic[] values, double[] radii) {
+  /** Makes one of values and upper bounds on their errors, in scaled units. */
+  static BoundedSolution of(ScaledSystem system, Dyadic[] values, double[] radii) {
     double lower = 0;
     double upper = 0;
     double radius = 0;

@@ -34,7 +34,12 @@ final class Certificate {
     if (!bounds.isProven()) {
       return Optional.empty();
     }
-    BoundedSolution solution = Refinement.run(system, inverse, bounds);
+    return of(route, system, bounds, Refinement.run(system, inverse, bounds));
+  }
+
+  /** Returns the certified solution; empty if it is not bounded well enough. */
+  static Optional<CertifiedSolution> of(
+      String route, ScaledSystem system, InverseBounds bounds, BoundedSolution solution) {
     if (!(solution.relativeBound() <= SOLUTION_TOLERANCE)) {
       return Optional.empty();
     }
@@ -59,7 +64,7 @@ final class Certificate {
         solution.isZero()
             ? UNBOUNDED
             : inverseNorm.times(matrixNorm().plus(Enclosure.of(largest).over(norm)));
-    Enclosure componentwise = solution.isZero() ? UNBOUNDED : inverseTimes(magnitudes()).over(norm);
+    Enclosure componentwise = solution.isZero() ? UNBOUNDED : componentwise(norm);
     return new CertifiedSolution(
         route,
         inUnits(Arrays.asList(solution.values())),
@@ -68,6 +73,14 @@ final class Certificate {
         inverseNorm.scalb(system.matrixShift),
         kappa,
         componentwise);
+  }
+
+  // Relative to the size of x from the start, since both factors may be large.
+  private Enclosure componentwise(Enclosure norm) {
+    int exponent = Math.getExponent(norm.upper());
+    Enclosure[] relative = magnitudes();
+    Arrays.setAll(relative, i -> relative[i].scalb(-exponent));
+    return inverseTimes(relative).over(norm.scalb(-exponent));
   }
 
   // The norm of |inverse of 2^g A| w, given diag(2^r) w.
@@ -125,10 +138,10 @@ final class Certificate {
 
   private Enclosure widened(double lower, double upper) {
     int n = system.size;
-    double underflow = n * RowSums.UNDERFLOW;
+    double underflow = n * Allowances.PROVEN.underflow();
     return new Enclosure(
-        Math.max(0, Math.nextDown(lower * RowSums.deflation(n) - underflow)),
-        Math.nextUp(upper * RowSums.inflation(n) + underflow));
+        Math.max(0, Math.nextDown(lower * Allowances.PROVEN.deflation(n) - underflow)),
+        Math.nextUp(upper * Allowances.PROVEN.inflation(n) + underflow));
   }
 
   private List<Dyadic> inUnits(List<Dyadic> scaled) {

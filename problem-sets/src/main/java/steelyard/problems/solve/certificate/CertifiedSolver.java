@@ -4,14 +4,16 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import steelyard.problems.UncertifiedException;
+import steelyard.problems.solve.rational.PadicLifting;
 
 /**
  * Solves systems with a proof, by the cheapest arithmetic in which the proof succeeds: double,
- * double-double, then fixed point with 128, 256, 512 and 1024 fraction bits. Which one that is
- * follows from the outcome of {@link Certificate} alone.
+ * double-double, then fixed point with 128, 256, 512 and 1024 fraction bits, and last in rational
+ * numbers, which takes minutes where n is 200 and is not tried beyond. Which one that is follows
+ * from the outcome of {@link Certificate} alone.
  *
- * <p>After scaling, double reaches condition numbers of about 1e13 and double-double about 1e26;
- * fixed point is tested up to 1e234.
+ * <p>After scaling, double reaches condition numbers of about 1e13, double-double about 1e26 and
+ * fixed point about 1e280; rational numbers have no limit but that of the range of double.
  */
 public final class CertifiedSolver {
   private static final int LARGEST_PRECISION = 1024;
@@ -33,15 +35,19 @@ public final class CertifiedSolver {
     return attempt(FIRST_ROUTES, system)
         .or(
             () -> {
-              requireNonsingular(system);
-              return attempt(fixedPointRoutes(), system);
+              PadicLifting lifting = requireNonsingular(system);
+              return attempt(fixedPointRoutes(), system).or(() -> rational(system, lifting));
             })
         .orElseThrow(
             () ->
                 new UncertifiedException(
                     "no reference could be certified with "
                         + LARGEST_PRECISION
-                        + " fraction bits: the condition number is too large"));
+                        + " fraction bits"
+                        + (system.size <= RationalCertificate.LARGEST_SIZE
+                            ? ", nor in rational numbers: the condition number exceeds the range"
+                                + " of double"
+                            : ": the condition number is too large")));
   }
 
   private static Optional<CertifiedSolution> attempt(List<Route> routes, ScaledSystem system) {
@@ -63,9 +69,22 @@ public final class CertifiedSolver {
     return routes;
   }
 
-  private static void requireNonsingular(ScaledSystem system) {
-    if (ModularDeterminant.isZero(system.size, system.matrix)) {
-      throw new UncertifiedException("the matrix is singular: its determinant is exactly zero");
+  private static Optional<CertifiedSolution> rational(ScaledSystem system, PadicLifting lifting) {
+    return system.size <= RationalCertificate.LARGEST_SIZE
+        ? RationalCertificate.attempt(system, lifting)
+        : Optional.empty();
+  }
+
+  private static PadicLifting requireNonsingular(ScaledSystem system) {
+    if (system.size > PadicLifting.LARGEST_SIZE) {
+      throw new UncertifiedException(
+          "the matrix may be singular: double-double does not tell, and n exceeds "
+              + PadicLifting.LARGEST_SIZE);
     }
+    return PadicLifting.of(system.size, system.matrix)
+        .orElseThrow(
+            () ->
+                new UncertifiedException(
+                    "the matrix is singular: its determinant is exactly zero"));
   }
 }

@@ -31,9 +31,11 @@ final class DoubleDoubleInverse implements ApproximateInverse {
   private final double[][] rows;
   private final double[] high;
   private final double[] low;
+  private final Allowances allowances;
 
   /** Makes one of two matrices, which are split anew so that |L| is at most 2^-53 |H|. */
-  DoubleDoubleInverse(ScaledSystem system, double[] high, double[] low) {
+  DoubleDoubleInverse(ScaledSystem system, double[] high, double[] low, Allowances allowances) {
+    this.allowances = allowances;
     size = system.size;
     matrix = system.matrix;
     rows = system.rows();
@@ -58,7 +60,7 @@ final class DoubleDoubleInverse implements ApproximateInverse {
       double[] high = system.matrix.clone();
       double[] low = new double[high.length];
       return GaussJordan.invert(new DoubleDoubleRows(system.size, high, low))
-          ? Optional.of(new DoubleDoubleInverse(system, high, low))
+          ? Optional.of(new DoubleDoubleInverse(system, high, low, Allowances.PROVEN))
           : Optional.empty();
     }
   }
@@ -74,7 +76,7 @@ final class DoubleDoubleInverse implements ApproximateInverse {
     double[] sum = new double[size];
     double[] errors = new double[size];
     double[] bounds = new double[size];
-    double gamma = RowSums.gamma(2 * (2 * size + 1));
+    double gamma = allowances.gamma(2 * (2 * size + 1));
     for (int i = 0; i < size; i++) {
       Arrays.fill(sum, 0);
       Arrays.fill(errors, 0);
@@ -90,8 +92,8 @@ final class DoubleDoubleInverse implements ApproximateInverse {
         distance += Math.abs(sum[j] + errors[j]);
       }
       bounds[i] =
-          (distance + gamma * gamma * magnitude) * RowSums.inflation(size)
-              + 3.0 * size * size * RowSums.UNDERFLOW;
+          (distance + gamma * gamma * magnitude) * allowances.inflation(size)
+              + 3.0 * size * size * allowances.underflow();
       bounds[i] = Math.nextUp(bounds[i]);
     }
     return bounds;

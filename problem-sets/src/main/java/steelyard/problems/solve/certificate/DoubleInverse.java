@@ -11,7 +11,7 @@ import java.util.Optional;
  * products; the last term is for products that underflow, each of which is wrong by at most
  * 2^-1075, while additions never underflow inexactly). A row sum of |I - R A| is therefore at most
  * that of |I - fl(R A)| + &gamma;_n |R| |A|, plus n² 2^-1074. All three are sums of nonnegative
- * numbers, evaluated in double and enlarged by {@link RowSums#inflation}, which covers the
+ * numbers, evaluated in double and enlarged by {@link Allowances#inflation}, which covers the
  * roundings of their evaluation, and by n² 2^-1022 for every underflow.
  */
 final class DoubleInverse implements ApproximateInverse {
@@ -19,7 +19,10 @@ final class DoubleInverse implements ApproximateInverse {
   private final double[][] matrix;
   private final double[][] inverse;
 
-  DoubleInverse(ScaledSystem system, double[][] inverse) {
+  private final Allowances allowances;
+
+  DoubleInverse(ScaledSystem system, double[][] inverse, Allowances allowances) {
+    this.allowances = allowances;
     size = system.size;
     matrix = system.rows();
     this.inverse = inverse;
@@ -36,7 +39,7 @@ final class DoubleInverse implements ApproximateInverse {
     public Optional<ApproximateInverse> invert(ScaledSystem system) {
       double[][] inverse = system.rows();
       return GaussJordan.invert(new DoubleRows(inverse))
-          ? Optional.of(new DoubleInverse(system, inverse))
+          ? Optional.of(new DoubleInverse(system, inverse, Allowances.PROVEN))
           : Optional.empty();
     }
   }
@@ -63,8 +66,8 @@ final class DoubleInverse implements ApproximateInverse {
         distance += Math.abs(entry);
       }
       bounds[i] =
-          (distance + RowSums.gamma(size) * magnitude) * RowSums.inflation(size)
-              + (double) size * size * RowSums.UNDERFLOW;
+          (distance + allowances.gamma(size) * magnitude) * allowances.inflation(size)
+              + (double) size * size * allowances.underflow();
       bounds[i] = Math.nextUp(bounds[i]);
     }
     return bounds;

@@ -122,7 +122,10 @@ final class FixedPointInverse implements ApproximateInverse {
       Dyadic rest = new Dyadic(sum, exponent - fractionBits);
       for (int part = 0; part < PARTS; part++) {
         product[part][i] = rest.doubleValue();
-        rest = rest.subtract(Dyadic.of(product[part][i]));
+        rest =
+            Double.isFinite(product[part][i])
+                ? rest.subtract(Dyadic.of(product[part][i]))
+                : Dyadic.ZERO;
       }
     }
     return product;

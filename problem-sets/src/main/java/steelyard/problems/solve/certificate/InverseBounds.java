@@ -23,8 +23,8 @@ import java.util.Arrays;
  *
  * <p>|R| v is evaluated in plain double arithmetic. The entries of |R| carry a relative error of at
  * most 2u, and a sum of n products at most &gamma;_n (Higham, Accuracy and Stability of Numerical
- * Algorithms, 2nd ed., SIAM 2002, section 3.1), which {@link RowSums#inflation} and {@link
- * RowSums#deflation} cover. An underflow costs at most 2^-1074 in an entry of |R|, hence 2^-1074
+ * Algorithms, 2nd ed., SIAM 2002, section 3.1), which {@link Allowances#inflation} and {@link
+ * Allowances#deflation} cover. An underflow costs at most 2^-1074 in an entry of |R|, hence 2^-1074
  * v_j in a product, and at most 2^-1075 in the product itself; 2^-1022 (sum of v + n) covers them
  * all.
  *
@@ -36,11 +36,24 @@ final class InverseBounds {
   private final double[] magnitudes;
   private final double[] residuals;
   private final double norm;
+  private final Allowances allowances;
 
   InverseBounds(ApproximateInverse inverse) {
-    size = inverse.size();
-    magnitudes = inverse.magnitudes();
-    residuals = inverse.residualRowSums();
+    this(inverse.magnitudes(), inverse.residualRowSums(), Allowances.PROVEN);
+  }
+
+  /**
+   * Makes those that follow from the parts of an {@link ApproximateInverse}.
+   *
+   * @param magnitudes |R| as there
+   * @param residualRowSums g as there
+   * @param allowances what is allowed for rounding
+   */
+  InverseBounds(double[] magnitudes, double[] residualRowSums, Allowances allowances) {
+    this.allowances = allowances;
+    size = residualRowSums.length;
+    this.magnitudes = magnitudes;
+    residuals = residualRowSums;
     norm = largest(residuals);
   }
 
@@ -54,7 +67,7 @@ final class InverseBounds {
     double[] bounds = product(v);
     double underflow = underflow(v);
     for (int i = 0; i < size; i++) {
-      bounds[i] = Math.nextUp(bounds[i] * RowSums.inflation(size) + underflow);
+      bounds[i] = Math.nextUp(bounds[i] * allowances.inflation(size) + underflow);
     }
     double largest = Math.nextUp(largest(bounds) / Math.nextDown(1 - norm));
     for (int i = 0; i < size; i++) {
@@ -72,7 +85,7 @@ final class InverseBounds {
     double underflow = underflow(low);
     Enclosure[] result = new Enclosure[size];
     for (int i = 0; i < size; i++) {
-      double lower = Math.nextDown(sums[i] * RowSums.deflation(size) - underflow);
+      double lower = Math.nextDown(sums[i] * allowances.deflation(size) - underflow);
       lower = Math.nextDown(lower - Math.nextUp(residuals[i] * largest));
       result[i] = new Enclosure(Math.max(0, lower), upper[i]);
     }
@@ -96,7 +109,7 @@ final class InverseBounds {
     for (double entry : v) {
       sum += entry;
     }
-    return (sum * RowSums.inflation(size) + 2.0 * size) * RowSums.UNDERFLOW;
+    return (sum * allowances.inflation(size) + 2.0 * size) * allowances.underflow();
   }
 
   private static double largest(double[] entries) {

@@ -23,7 +23,7 @@ class ResidualBoundTest {
         disturb(inverse[random.nextInt(n)], trial);
         requireBound(
             system,
-            new DoubleInverse(system, inverse),
+            new DoubleInverse(system, inverse, Allowances.PROVEN),
             at -> Dyadic.of(inverse[at / n][at % n]),
             1e-13);
       }
@@ -41,7 +41,7 @@ class ResidualBoundTest {
         disturb(trial % 2 == 0 ? high : low, trial);
         requireBound(
             system,
-            new DoubleDoubleInverse(system, high, low),
+            new DoubleDoubleInverse(system, high, low, Allowances.PROVEN),
             at -> Dyadic.of(high[at]).add(Dyadic.of(low[at])),
             1e-28);
       }
