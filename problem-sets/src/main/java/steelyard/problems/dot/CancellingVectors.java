@@ -5,6 +5,7 @@ import org.apache.commons.rng.UniformRandomProvider;
 import steelyard.problems.Family;
 import steelyard.problems.exact.Dyadic;
 import steelyard.problems.exact.ExactAccumulator;
+import steelyard.problems.exact.ExactSums;
 import steelyard.problems.generate.Cancellation;
 import steelyard.problems.generate.Draw;
 
@@ -71,6 +72,6 @@ final class CancellingVectors implements Cancellation.Ledger {
 
   @Override
   public Dyadic absoluteSum() {
-    return ExactAccumulator.absoluteDot(Arrays.copyOf(x, count), Arrays.copyOf(y, count));
+    return ExactSums.ofProducts(Arrays.copyOf(x, count), Arrays.copyOf(y, count)).absoluteSum();
   }
 }

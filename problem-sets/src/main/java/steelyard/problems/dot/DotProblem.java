@@ -7,7 +7,7 @@ import steelyard.problems.ScalarJudge;
 import steelyard.problems.Trait;
 import steelyard.problems.exact.Dyadic;
 import steelyard.problems.exact.ErrorFree;
-import steelyard.problems.exact.ExactAccumulator;
+import steelyard.problems.exact.ExactSums;
 
 /**
  * A dot product s of two stored vectors. The reference is exact; the condition number is 2
@@ -38,7 +38,8 @@ public final class DotProblem extends ExactScalarProblem<Vectors> {
     if (x.length == 0) {
       throw new IllegalArgumentException("a dot product needs at least one pair of entries");
     }
-    return new ScalarJudge(ExactAccumulator.dot(x, y), ExactAccumulator.absoluteDot(x, y).scalb(1));
+    ExactSums sums = ExactSums.ofProducts(x, y);
+    return new ScalarJudge(sums.sum(), sums.absoluteSum().scalb(1));
   }
 
   private static Set<String> verifiedTraits(Vectors data, ScalarJudge judge) {

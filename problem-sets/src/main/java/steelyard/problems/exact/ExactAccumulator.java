@@ -42,20 +42,7 @@ public final class ExactAccumulator {
 
   /** Returns the exact sum of terms. */
   public static Dyadic sum(double... terms) {
-    ExactAccumulator accumulator = new ExactAccumulator();
-    for (double term : terms) {
-      accumulator.add(term);
-    }
-    return accumulator.value();
-  }
-
-  /** Returns the exact sum of the absolute values of terms. */
-  public static Dyadic absoluteSum(double... terms) {
-    ExactAccumulator accumulator = new ExactAccumulator();
-    for (double term : terms) {
-      accumulator.addAbs(term);
-    }
-    return accumulator.value();
+    return ExactSums.of(terms).sum();
   }
 
   /**
@@ -64,26 +51,7 @@ public final class ExactAccumulator {
    * @throws IllegalArgumentException if they differ in length
    */
   public static Dyadic dot(double[] x, double[] y) {
-    requireSameLength(x, y);
-    ExactAccumulator accumulator = new ExactAccumulator();
-    for (int i = 0; i < x.length; i++) {
-      accumulator.addProduct(x[i], y[i]);
-    }
-    return accumulator.value();
-  }
-
-  /**
-   * Returns the exact dot product of the absolute values of two vectors.
-   *
-   * @throws IllegalArgumentException if they differ in length
-   */
-  public static Dyadic absoluteDot(double[] x, double[] y) {
-    requireSameLength(x, y);
-    ExactAccumulator accumulator = new ExactAccumulator();
-    for (int i = 0; i < x.length; i++) {
-      accumulator.addAbsProduct(x[i], y[i]);
-    }
-    return accumulator.value();
+    return ExactSums.ofProducts(x, y).sum();
   }
 
   /**
@@ -145,6 +113,32 @@ public final class ExactAccumulator {
    */
   public void addAbsProduct(double x, double y) {
     addProduct(Math.abs(x), Math.abs(y));
+  }
+
+  /**
+   * Adds an integer times the weight of the lowest bit of the doubles with a given exponent field.
+   *
+   * @throws IllegalArgumentException if the field is that of infinities and NaN
+   */
+  void addMultiple(long magnitude, int field, boolean negative) {
+    requireFinite(field);
+    addInteger(magnitude, Math.max(field, 1) + Binary64.LEAST_EXPONENT - 1, negative);
+  }
+
+  /** Adds an integer below 2^63 times a power of two, or its negative. */
+  void addInteger(long magnitude, int exponent, boolean negative) {
+    if (magnitude == 0) {
+      return;
+    }
+    int position = exponent - LOWEST_EXPONENT;
+    int chunk = position >>> 5;
+    int shift = position & 31;
+    long sign = negative ? -1 : 0;
+    long rest = magnitude >>> (CHUNK_BITS - shift);
+    addSigned(chunk, (magnitude << shift) & CHUNK_MASK, sign);
+    addSigned(chunk + 1, rest & CHUNK_MASK, sign);
+    addSigned(chunk + 2, rest >>> CHUNK_BITS, sign);
+    countTerm();
   }
 
   /** Adds another accumulator's number. */
@@ -306,17 +300,6 @@ public final class ExactAccumulator {
   private static void requireFinite(int field) {
     if (field == EXPONENT_MASK) {
       throw new IllegalArgumentException("a finite double is wanted, but it is infinite or NaN");
-    }
-  }
-
-  private static void requireSameLength(double[] x, double[] y) {
-    if (x.length != y.length) {
-      throw new IllegalArgumentException(
-          "two vectors of the same length are wanted, but they have "
-              + x.length
-              + " and "
-              + y.length
-              + " entries");
     }
   }
 }

@@ -7,6 +7,7 @@ import steelyard.problems.Judgement.Standing;
 import steelyard.problems.exact.Binary64;
 import steelyard.problems.exact.Dyadic;
 import steelyard.problems.exact.ExactAccumulator;
+import steelyard.problems.exact.ExactSums;
 import steelyard.problems.solve.certificate.CertifiedSolution;
 
 /**
@@ -34,7 +35,7 @@ final class AnswerJudge {
     solutionNorm = solution.norm();
     Dyadic largest = Dyadic.ZERO;
     for (double[] row : system.a()) {
-      largest = max(largest, ExactAccumulator.absoluteSum(row));
+      largest = max(largest, ExactSums.of(row).absoluteSum());
     }
     matrixNorm = largest;
     rightHandSideNorm = norm(system.b());

@@ -35,6 +35,21 @@ final class RandomMatrices {
     return q;
   }
 
+  /** Returns a random vector v for which I - v vᵀ is a reflector: one of norm sqrt(2). */
+  static double[] reflectorVector(int n, UniformRandomProvider random) {
+    double[] v = new double[n];
+    double square = 0;
+    for (int i = 0; i < n; i++) {
+      v[i] = gaussian(random);
+      square += v[i] * v[i];
+    }
+    double scale = Math.sqrt(square / 2);
+    for (int i = 0; i < n; i++) {
+      v[i] /= scale;
+    }
+    return v;
+  }
+
   // Turns a vector into that of the reflector that maps it onto an axis, scaled so that the
   // reflector is I - v v'; returns the sign of the entry onto which it is mapped.
   private static double reflectOntoAxis(double[] v, int start) {

@@ -1,14 +1,16 @@
 package steelyard.problems.solve;
 
 import java.util.List;
+import java.util.function.Function;
 import org.apache.commons.rng.UniformRandomProvider;
 import steelyard.problems.Family.Profile;
 import steelyard.problems.Family.Request;
 import steelyard.problems.Reach;
 
 /**
- * Matrices with prescribed singular values or eigenvalues between Haar-distributed orthogonal
- * factors. The right-hand side is a x for an x of order 1, correctly rounded.
+ * Matrices with prescribed singular values or eigenvalues between orthogonal factors, which are
+ * Haar-distributed but for one family. The right-hand side is a x for an x of order 1, correctly
+ * rounded.
  */
 final class SpectrumFamilies {
   private static final String SOURCE =
@@ -49,6 +51,7 @@ final class SpectrumFamilies {
             "singular values evenly spaced: most of them large",
             (i, n, alpha) -> 1 - (1 - 1 / alpha) * i / (n - 1.0)),
         logUniform(),
+        reflected(),
         positiveDefinite());
   }
 
@@ -81,6 +84,21 @@ final class SpectrumFamilies {
         });
   }
 
+  private static SystemFamily reflected() {
+    return new SystemFamily(
+        new Profile(
+            "reflected-geometric",
+            "singular values evenly spread over the magnitudes, in a matrix that is cheap to make:"
+                + " most singular vectors lie near the axes",
+            KNOB,
+            "own construction: a diagonal matrix between two random Householder reflectors"),
+        Reach.upTo(1e16, 2, LARGEST_SIZE),
+        (request, random) -> {
+          ReflectedDiagonal reflectors = ReflectedDiagonal.draw(request.size(), random);
+          return general(request, random, SpectrumFamilies::geometric, reflectors::around);
+        });
+  }
+
   private static SystemFamily positiveDefinite() {
     return new SystemFamily(
         new Profile(
@@ -97,13 +115,19 @@ final class SpectrumFamilies {
       Request request, UniformRandomProvider random, Spectrum spectrum) {
     double[][] u = RandomMatrices.orthogonal(request.size(), random);
     double[][] v = RandomMatrices.orthogonal(request.size(), random);
+    return general(request, random, spectrum, values -> RandomMatrices.product(u, values, v));
+  }
+
+  private static LinearSystem general(
+      Request request,
+      UniformRandomProvider random,
+      Spectrum spectrum,
+      Function<double[], double[][]> factors) {
     double[] x = RandomMatrices.ofOrderOne(request.size(), random);
     return Calibration.nearest(
         request.condition(),
         1e17,
-        alpha ->
-            RandomMatrices.withSolution(
-                RandomMatrices.product(u, values(spectrum, x.length, alpha), v), x));
+        alpha -> RandomMatrices.withSolution(factors.apply(values(spectrum, x.length, alpha)), x));
   }
 
   private static LinearSystem symmetric(Request request, UniformRandomProvider random) {

@@ -4,7 +4,7 @@ import java.util.Collections;
 import java.util.LinkedHashSet;
 import java.util.Set;
 import steelyard.problems.exact.Dyadic;
-import steelyard.problems.exact.ExactAccumulator;
+import steelyard.problems.exact.ExactSums;
 import steelyard.problems.solve.certificate.Definiteness;
 
 /**
@@ -49,7 +49,7 @@ final class SystemTraits {
   private static boolean isDiagonallyDominant(double[][] a) {
     for (int i = 0; i < a.length; i++) {
       Dyadic twice = Dyadic.of(a[i][i]).abs().scalb(1);
-      if (twice.compareTo(ExactAccumulator.absoluteSum(a[i])) < 0) {
+      if (twice.compareTo(ExactSums.of(a[i]).absoluteSum()) < 0) {
         return false;
       }
     }

@@ -5,6 +5,7 @@ import org.apache.commons.rng.UniformRandomProvider;
 import steelyard.problems.Family;
 import steelyard.problems.exact.Dyadic;
 import steelyard.problems.exact.ExactAccumulator;
+import steelyard.problems.exact.ExactSums;
 import steelyard.problems.generate.Cancellation;
 import steelyard.problems.generate.Draw;
 
@@ -43,6 +44,6 @@ final class CancellingTerms implements Cancellation.Ledger {
 
   @Override
   public Dyadic absoluteSum() {
-    return ExactAccumulator.absoluteSum(Arrays.copyOf(terms, count));
+    return ExactSums.of(Arrays.copyOf(terms, count)).absoluteSum();
   }
 }

@@ -6,7 +6,7 @@ import steelyard.problems.ExactScalarProblem;
 import steelyard.problems.ScalarJudge;
 import steelyard.problems.Trait;
 import steelyard.problems.exact.Dyadic;
-import steelyard.problems.exact.ExactAccumulator;
+import steelyard.problems.exact.ExactSums;
 
 /**
  * A sum s of stored terms x. The reference is exact; the condition number is &Sigma;|x| / |s| and
@@ -35,7 +35,8 @@ public final class SumProblem extends ExactScalarProblem<Terms> {
     if (terms.length == 0) {
       throw new IllegalArgumentException("a sum needs at least one term, but there are none");
     }
-    return new ScalarJudge(ExactAccumulator.sum(terms), ExactAccumulator.absoluteSum(terms));
+    ExactSums sums = ExactSums.of(terms);
+    return new ScalarJudge(sums.sum(), sums.absoluteSum());
   }
 
   private static Set<String> verifiedTraits(double[] terms, ScalarJudge judge) {

@@ -21,7 +21,7 @@ class ExactAccumulatorTest {
         absolute = absolute.add(new BigDecimal(term).abs());
       }
       assertThat(ExactAccumulator.sum(terms).toBigDecimal()).isEqualByComparingTo(sum);
-      assertThat(ExactAccumulator.absoluteSum(terms).toBigDecimal()).isEqualByComparingTo(absolute);
+      assertThat(ExactSums.of(terms).absoluteSum().toBigDecimal()).isEqualByComparingTo(absolute);
     }
   }
 
@@ -39,7 +39,8 @@ class ExactAccumulatorTest {
         absolute = absolute.add(product.abs());
       }
       assertThat(ExactAccumulator.dot(x, y).toBigDecimal()).isEqualByComparingTo(sum);
-      assertThat(ExactAccumulator.absoluteDot(x, y).toBigDecimal()).isEqualByComparingTo(absolute);
+      assertThat(ExactSums.ofProducts(x, y).absoluteSum().toBigDecimal())
+          .isEqualByComparingTo(absolute);
     }
   }
 

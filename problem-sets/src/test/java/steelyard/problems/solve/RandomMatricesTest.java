@@ -3,6 +3,9 @@ package steelyard.problems.solve;
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.within;
 
+import java.util.Arrays;
+import org.apache.commons.math3.linear.Array2DRowRealMatrix;
+import org.apache.commons.math3.linear.SingularValueDecomposition;
 import org.apache.commons.rng.UniformRandomProvider;
 import org.apache.commons.rng.simple.RandomSource;
 import org.junit.jupiter.api.Test;
@@ -54,6 +57,25 @@ class RandomMatricesTest {
         assertThat(square[i][j]).isCloseTo(1 / 3.0, within(5 * 0.299 / Math.sqrt(samples)));
         assertThat(fourth[i][j]).isCloseTo(0.2, within(5 * 0.267 / Math.sqrt(samples)));
       }
+    }
+  }
+
+  // Against the singular value decomposition of Apache Commons Math.
+  @Test
+  void reflectedDiagonalsHaveTheSingularValuesAskedFor() {
+    for (int n : new int[] {1, 2, 7, 40}) {
+      double[] values = new double[n];
+      for (int i = 0; i < n; i++) {
+        values[i] = Math.scalb(1.0, -i % 20);
+      }
+      double[][] a = ReflectedDiagonal.draw(n, random).around(values);
+      double[] found =
+          new SingularValueDecomposition(new Array2DRowRealMatrix(a)).getSingularValues();
+      Arrays.sort(values);
+      for (int i = 0; i < n; i++) {
+        assertThat(found[n - 1 - i]).isCloseTo(values[i], within(1e-14));
+      }
+      assertThat(n == 1 || a[0][n - 1] != 0).isTrue();
     }
   }
 
