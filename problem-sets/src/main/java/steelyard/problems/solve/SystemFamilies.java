@@ -12,6 +12,7 @@ public final class SystemFamilies {
   public static List<Family<LinearSystem>> all() {
     List<Family<LinearSystem>> families = new ArrayList<>();
     families.addAll(SpectrumFamilies.all());
+    families.add(NearlyDependentFamily.create());
     families.add(BadlyScaledFamily.create());
     families.addAll(ClassicalFamilies.all());
     families.add(DepotFamily.create());
