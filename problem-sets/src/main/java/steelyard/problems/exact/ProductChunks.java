@@ -28,27 +28,26 @@ final class ProductChunks {
   // The upper half of a product has 49 bits, so that as many fit a long.
   private static final int LARGEST_BLOCK = 1 << 14;
 
-  private final long[] low = new long[2 * PLACES];
-  private final long[] middle = new long[2 * PLACES];
-  private final long[] high = new long[2 * PLACES];
-  private final ExactAccumulator positive;
-  private final ExactAccumulator negative;
-
-  private ProductChunks(ExactAccumulator positive, ExactAccumulator negative) {
-    this.positive = positive;
-    this.negative = negative;
-  }
+  private ProductChunks() {}
 
   /** Adds products to two accumulators, by their signs. */
   static void add(double[] x, double[] y, ExactAccumulator positive, ExactAccumulator negative) {
     for (int from = 0; from < x.length; from += LARGEST_BLOCK) {
-      ProductChunks chunks = new ProductChunks(positive, negative);
-      chunks.add(x, y, from, Math.min(x.length, from + LARGEST_BLOCK));
-      chunks.drain();
+      add(x, y, from, Math.min(x.length, from + LARGEST_BLOCK), positive, negative);
     }
   }
 
-  private void add(double[] x, double[] y, int from, int to) {
+  private static void add(
+      double[] x,
+      double[] y,
+      int from,
+      int to,
+      ExactAccumulator positive,
+      ExactAccumulator negative) {
+    // Local, so that the compiler knows their lengths.
+    long[] low = new long[2 * PLACES];
+    long[] middle = new long[2 * PLACES];
+    long[] high = new long[2 * PLACES];
     for (int i = from; i < to; i++) {
       long xBits = Double.doubleToRawLongBits(x[i]);
       long yBits = Double.doubleToRawLongBits(y[i]);
@@ -68,14 +67,6 @@ final class ProductChunks {
       middle[place] += product >>> 32;
       high[place] += Math.multiplyHigh(left, right);
     }
-  }
-
-  // Negative for the fields of zero, subnormal numbers, infinities and NaN.
-  private static int normality(int field) {
-    return ((field + 1) & (EXPONENT_MASK - 1)) - 1;
-  }
-
-  private void drain() {
     for (int place = 0; place < 2 * PLACES; place++) {
       if ((low[place] | middle[place] | high[place]) == 0) {
         continue;
@@ -87,5 +78,10 @@ final class ProductChunks {
       target.addInteger(middle[place], exponent + 32, isNegative);
       target.addInteger(high[place], exponent + 64, isNegative);
     }
+  }
+
+  // Negative for the fields of zero, subnormal numbers, infinities and NaN.
+  private static int normality(int field) {
+    return ((field + 1) & (EXPONENT_MASK - 1)) - 1;
   }
 }
