@@ -4,9 +4,10 @@ import java.util.Arrays;
 import org.apache.commons.math3.fraction.BigFraction;
 
 /** The errors of an answer in rational arithmetic, straight from their definitions. */
-record ExactErrors(LinearSystem system, BigFraction[] solution, double[] answer) {
+public record ExactErrors(LinearSystem system, BigFraction[] solution, double[] answer) {
 
-  BigFraction normwise() {
+  /** Returns the normwise backward error of Rigal and Gaches. */
+  public BigFraction normwise() {
     BigFraction matrixNorm = BigFraction.ZERO;
     BigFraction residual = BigFraction.ZERO;
     for (int i = 0; i < answer.length; i++) {
@@ -21,7 +22,8 @@ record ExactErrors(LinearSystem system, BigFraction[] solution, double[] answer)
     return residual.divide(size);
   }
 
-  BigFraction componentwise() {
+  /** Returns the componentwise backward error of Oettli and Prager. */
+  public BigFraction componentwise() {
     BigFraction largest = BigFraction.ZERO;
     for (int i = 0; i < answer.length; i++) {
       BigFraction size = RationalInverse.exact(system.b()[i]).abs();
@@ -33,7 +35,8 @@ record ExactErrors(LinearSystem system, BigFraction[] solution, double[] answer)
     return largest;
   }
 
-  BigFraction forward() {
+  /** Returns the forward error in the maximum norm. */
+  public BigFraction forward() {
     BigFraction largest = BigFraction.ZERO;
     for (int i = 0; i < answer.length; i++) {
       largest = larger(largest, error(i));
@@ -41,7 +44,8 @@ record ExactErrors(LinearSystem system, BigFraction[] solution, double[] answer)
     return largest.divide(RationalInverse.norm(solution));
   }
 
-  BigFraction worstEntry() {
+  /** Returns the largest relative error of an entry. */
+  public BigFraction worstEntry() {
     BigFraction largest = BigFraction.ZERO;
     for (int i = 0; i < answer.length; i++) {
       largest = larger(largest, error(i).divide(solution[i].abs()));

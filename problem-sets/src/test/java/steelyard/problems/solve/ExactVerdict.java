@@ -9,7 +9,7 @@ import steelyard.problems.solve.certificate.CertifiedSolver;
 import steelyard.problems.solve.certificate.Enclosure;
 
 /** Holds everything that is certified of a system against its exact rational solution. */
-final class ExactVerdict {
+public final class ExactVerdict {
   private static final double WIDTH = 0.01;
   private static final double RELATIVE_BOUND = 1e-40;
 
@@ -30,7 +30,7 @@ final class ExactVerdict {
    * @return the certified solution
    * @throws AssertionError if a bound is violated, with the system in full
    */
-  static CertifiedSolution require(LinearSystem system) {
+  public static CertifiedSolution require(LinearSystem system) {
     try {
       CertifiedSolution solution = CertifiedSolver.solve(system.a(), system.b());
       require(system, solution);
@@ -76,7 +76,7 @@ final class ExactVerdict {
   }
 
   /** Says whether an exact value lies inside an enclosure. */
-  static boolean contains(Enclosure enclosure, BigFraction value) {
+  public static boolean contains(Enclosure enclosure, BigFraction value) {
     return RationalInverse.exact(enclosure.lower()).compareTo(value) <= 0
         && RationalInverse.exact(enclosure.upper()).compareTo(value) >= 0;
   }
