@@ -9,8 +9,10 @@ import org.apfloat.Apfloat;
 import org.apfloat.ApfloatMath;
 
 /**
- * Holds a scalar problem's condition number and errors against two independent paths: exact decimal
- * fractions, multiplied out so that nothing is rounded, and division by apfloat with 60 digits.
+ * Holds a scalar problem's answer, condition number and errors against two independent paths that
+ * must agree with each other: exact decimal fractions, multiplied out so that nothing is rounded,
+ * and apfloat, whose sums and products are exact at infinite precision and whose quotients have 60
+ * digits.
  */
 public final class IndependentErrors {
   private static final int DIGITS = 60;
@@ -18,12 +20,41 @@ public final class IndependentErrors {
   private IndependentErrors() {}
 
   /**
-   * Checks a problem.
+   * Checks a problem whose exact answer is a dot product.
    *
-   * @param exact its exact answer
-   * @param scale what its backward error is relative to
+   * @param x one vector
+   * @param y the other; ones for a sum
+   * @param factor what the sum of the absolute products is multiplied by to give what the backward
+   *     error is relative to
    */
-  public static void check(Problem<?> problem, BigDecimal exact, BigDecimal scale) {
+  public static void check(Problem<?> problem, double[] x, double[] y, int factor) {
+    BigDecimal exact = BigDecimal.ZERO;
+    BigDecimal scale = BigDecimal.ZERO;
+    Apfloat sum = Apfloat.ZERO;
+    Apfloat absolute = Apfloat.ZERO;
+    for (int i = 0; i < x.length; i++) {
+      BigDecimal product = new BigDecimal(x[i]).multiply(new BigDecimal(y[i]));
+      exact = exact.add(product);
+      scale = scale.add(product.abs().multiply(BigDecimal.valueOf(factor)));
+      Apfloat term = apfloat(x[i]).multiply(apfloat(y[i]));
+      sum = sum.add(term);
+      absolute = absolute.add(ApfloatMath.abs(term).multiply(new Apfloat(factor)));
+    }
+    requireSame(sum, exact);
+    requireSame(absolute, scale);
+    check(problem, exact, scale);
+  }
+
+  private static Apfloat apfloat(double value) {
+    return new Apfloat(new BigDecimal(value), Apfloat.INFINITE);
+  }
+
+  private static void requireSame(Apfloat sum, BigDecimal exact) {
+    assertThat(sum.precision()).isEqualTo(Apfloat.INFINITE);
+    assertThat(new BigDecimal(sum.toString())).isEqualByComparingTo(exact);
+  }
+
+  private static void check(Problem<?> problem, BigDecimal exact, BigDecimal scale) {
     assertThat(problem.reference().answer(MathContext.UNLIMITED).get(0))
         .isEqualByComparingTo(exact);
     if (exact.signum() == 0) {

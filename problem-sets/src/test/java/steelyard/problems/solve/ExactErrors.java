@@ -1,6 +1,7 @@
 package steelyard.problems.solve;
 
 import java.util.Arrays;
+import java.util.stream.IntStream;
 import org.apache.commons.math3.fraction.BigFraction;
 
 /** The errors of an answer in rational arithmetic, straight from their definitions. */
@@ -51,6 +52,10 @@ public record ExactErrors(LinearSystem system, BigFraction[] solution, double[] 
       largest = larger(largest, error(i).divide(solution[i].abs()));
     }
     return largest;
+  }
+
+  BigFraction[] residuals() {
+    return IntStream.range(0, answer.length).mapToObj(this::residual).toArray(BigFraction[]::new);
   }
 
   private BigFraction error(int i) {
