@@ -30,6 +30,9 @@ final class ProblemRows<K, D extends Data> {
 
   private static final double CALIBRATION_FACTOR = 2;
 
+  private static final String TOO_VAGUE =
+      "the reference is certified, but its bound is too coarse to tell the error of this answer";
+
   private final Assignment<K, D> assignment;
   private final Problem<D> problem;
   private final String digest;
@@ -53,10 +56,11 @@ final class ProblemRows<K, D extends Data> {
       return row(candidate, attempt.status(), attempt.detail(), Optional.empty(), null);
     }
     Judgement judgement = problem.judge(attempt.answer());
+    boolean isVague = judgement.standing() == Judgement.Standing.UNCERTIFIED;
     return row(
         candidate,
         status(judgement.standing()),
-        attempt.detail(),
+        isVague ? TOO_VAGUE : attempt.detail(),
         Optional.of(judgement),
         attempt.answer());
   }
