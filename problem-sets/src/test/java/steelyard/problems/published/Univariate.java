@@ -95,9 +95,4 @@ record Univariate(
     }
     return most;
   }
-
-  @Override
-  public String toString() {
-    return "%s data with mean %s".formatted(data.size(), mean);
-  }
 }
