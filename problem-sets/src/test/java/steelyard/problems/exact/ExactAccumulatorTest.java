@@ -101,9 +101,7 @@ class ExactAccumulatorTest {
     assertThat(accumulator.value()).isEqualTo(once.scalb(62));
   }
 
-  /**
-   * Rounding goes by the chunks, and must agree with that of the exact value on ties and beyond.
-   */
+  /** Rounding goes by the chunks, and must agree with that of the exact value everywhere. */
   @Test
   void roundsAsItsExactValueDoes() {
     RandomDoubles doubles = new RandomDoubles(3);
@@ -114,8 +112,56 @@ class ExactAccumulatorTest {
         accumulator.add(Math.scalb(term, -53 - doubles.below(60)));
         accumulator.addProduct(term, Math.scalb(1.0, -53 - doubles.below(3)));
       }
-      assertThat(accumulator.round()).isEqualTo(accumulator.value().doubleValue());
+      requireRounded(accumulator);
     }
+  }
+
+  /** Ties, broken or not by something below, at every place within a chunk and of either sign. */
+  @Test
+  void roundsTiesAsItsExactValueDoes() {
+    for (int exponent = -1000; exponent < 1020; exponent += 7) {
+      for (int below : new int[] {0, 1, 2, 11, 12, 40, 44, 45, 64, 65, 90, 600, 1000}) {
+        for (int sign = -1; sign <= 1; sign += 2) {
+          ExactAccumulator accumulator = new ExactAccumulator();
+          accumulator.addInteger((1L << 54) - 1, exponent - 53, sign < 0);
+          if (below > 0) {
+            accumulator.addInteger(1, exponent - 53 - below, false);
+          }
+          requireRounded(accumulator);
+          accumulator.addInteger(2, exponent - 53, sign > 0);
+          requireRounded(accumulator);
+        }
+      }
+    }
+  }
+
+  /** Around the least double and half of it, and around the largest and 2^1024. */
+  @Test
+  void roundsAtTheEndsOfTheRangeAsItsExactValueDoes() {
+    for (int eighths = 0; eighths <= 40; eighths++) {
+      ExactAccumulator tiny = new ExactAccumulator();
+      tiny.addInteger(eighths, -1077, false);
+      requireRounded(tiny);
+      tiny.addInteger(1, -2140, false);
+      requireRounded(tiny);
+      ExactAccumulator huge = new ExactAccumulator();
+      huge.add(-Double.MAX_VALUE);
+      huge.addInteger(eighths, 968, true);
+      requireRounded(huge);
+      huge.addProduct(-0x1p1000, 0x1p1000);
+      requireRounded(huge);
+      for (int i = 0; i < 45; i++) {
+        huge.addProduct(-Double.MAX_VALUE, Double.MAX_VALUE);
+        ExactAccumulator copy = new ExactAccumulator();
+        copy.add(huge);
+        huge.add(copy);
+      }
+      assertThat(huge.round()).isEqualTo(Double.NEGATIVE_INFINITY);
+    }
+  }
+
+  private static void requireRounded(ExactAccumulator accumulator) {
+    assertThat(accumulator.round()).isEqualTo(accumulator.value().doubleValue());
   }
 
   @Test

@@ -33,6 +33,25 @@ class EnclosureTest {
     assertThat(Enclosure.of(1).over(new Enclosure(0, 2)).isWithin(0.01)).isFalse();
   }
 
+  @Test
+  void endsBelongToIt() {
+    Enclosure enclosure = new Enclosure(1, 3);
+    assertThat(enclosure.contains(1)).isTrue();
+    assertThat(enclosure.contains(3)).isTrue();
+    assertThat(enclosure.contains(Math.nextDown(1.0))).isFalse();
+    assertThat(enclosure.contains(Math.nextUp(3.0))).isFalse();
+    assertThat(enclosure.midpoint()).isEqualTo(2);
+  }
+
+  @Test
+  void narrownessCountsFromTheLowerEnd() {
+    assertThat(new Enclosure(2, 3).isWithin(0.5)).isTrue();
+    assertThat(new Enclosure(2, 3).isWithin(0.49)).isFalse();
+    assertThat(new Enclosure(0, 0).isWithin(1)).isFalse();
+    assertThat(new Enclosure(1, Double.POSITIVE_INFINITY).isWithin(Double.POSITIVE_INFINITY))
+        .isFalse();
+  }
+
   private static void requireInside(Enclosure enclosure, BigFraction exact) {
     assertThat(RationalInverse.exact(enclosure.lower()).compareTo(exact)).isNotPositive();
     assertThat(RationalInverse.exact(enclosure.upper()).compareTo(exact)).isNotNegative();

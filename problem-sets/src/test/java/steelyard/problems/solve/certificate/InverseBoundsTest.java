@@ -58,6 +58,28 @@ class InverseBoundsTest {
     requireBounds(0.6, 0.6, Double.MIN_VALUE);
   }
 
+  // With A = 1 and R = 1/2 the row sum of |I - R A| is 1/2, and |A⁻¹| v = v is attained: neither
+  // the
+  // geometric series nor the row sum may be smaller by any factor.
+  @Test
+  void boundIsAttainedByAHalvedInverse() {
+    double[] half = {0.5};
+    assertThat(bounds(half, 0.5).upper(new double[] {3})[0]).isBetween(3.0, 3.0 + 1e-13);
+    assertThat(bounds(half, 0.25).upper(new double[] {3})[0]).isLessThan(2.01);
+  }
+
+  @Test
+  void lowerBoundTakesOffWhatTheUpperAdds() {
+    double[] larger = {1.5};
+    Enclosure[] exact = {Enclosure.of(3)};
+    assertThat(bounds(larger, 0.5).enclose(exact)[0].lower()).isBetween(0.0, 1e-12);
+    assertThat(bounds(larger, 0.25).enclose(exact)[0].lower()).isBetween(2.99, 3.0);
+  }
+
+  private static InverseBounds bounds(double[] magnitudes, double residual) {
+    return new InverseBounds(magnitudes, new double[] {residual}, Allowances.PROVEN);
+  }
+
   private static void requireBounds(double first, double others, double entry) {
     double[] magnitudes = new double[SIZE * SIZE];
     Arrays.fill(magnitudes, others);

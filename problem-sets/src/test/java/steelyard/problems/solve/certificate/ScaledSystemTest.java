@@ -36,6 +36,32 @@ class ScaledSystemTest {
   }
 
   @Test
+  void matrixAndRightHandSideAreBroughtToTheSizeOfOne() {
+    ScaledSystem scaled =
+        new ScaledSystem(new double[][] {{3, 24}, {0x1p-20, 1}}, new double[] {0, 0x1.8p40});
+    assertThat(scaled.matrixShift).isEqualTo(-5);
+    assertThat(scaled.vectorShift).isEqualTo(-41);
+    assertThat(scaled.columnShift).containsExactly(3, 0);
+    assertThat(scaled.rowShift).containsExactly(0, 4);
+    assertThat(scaled.matrix).containsExactly(0.75, 0.75, 0x1p-18, 0.5);
+    assertThat(scaled.rightHandSide).containsExactly(0, 12);
+    assertThat(new ScaledSystem(new double[][] {{3}}, new double[] {0}).vectorShift).isZero();
+  }
+
+  // Beyond 400 powers of two the units stay as they are, and nothing overflows.
+  @Test
+  void rowsAndColumnsFarApartAreLeftAlone() {
+    for (int spread : new int[] {400, 401}) {
+      double least = Math.scalb(0.5, -spread);
+      ScaledSystem scaled =
+          new ScaledSystem(new double[][] {{0.5, 0}, {0, least}}, new double[] {0.5, 0.5});
+      assertThat(scaled.columnShift[1]).isEqualTo(spread == 400 ? 400 : 0);
+      assertThat(scaled.rowShift).containsExactly(0, 0);
+      assertThat(scaled.matrix[3]).isEqualTo(spread == 400 ? 0.5 : least);
+    }
+  }
+
+  @Test
   void magnitudeIsTheExponentOfTheNextPowerOfTwo() {
     assertThat(ScaledSystem.magnitude(1)).isEqualTo(1);
     assertThat(ScaledSystem.magnitude(Math.nextDown(1.0))).isZero();
