@@ -6,8 +6,9 @@ package steelyard.problems.exact;
  */
 public final class ExactSums {
 
-  // From here on looking through the large accumulator's chunks costs less than they save.
+  // From here on looking through many chunks costs less than they save.
   private static final int LEAST_FOR_LARGE = 8192;
+  private static final int LEAST_FOR_PRODUCT_CHUNKS = 2048;
 
   private final ExactAccumulator positive = new ExactAccumulator();
   private final ExactAccumulator negative = new ExactAccumulator();
@@ -49,7 +50,14 @@ public final class ExactSums {
               + " entries");
     }
     ExactSums sums = new ExactSums();
-    ProductChunks.add(x, y, sums.positive, sums.negative);
+    if (x.length < LEAST_FOR_PRODUCT_CHUNKS) {
+      for (int i = 0; i < x.length; i++) {
+        boolean isNegative = Math.signum(x[i]) * Math.signum(y[i]) < 0;
+        (isNegative ? sums.negative : sums.positive).addProduct(x[i], y[i]);
+      }
+    } else {
+      ProductChunks.add(x, y, sums.positive, sums.negative);
+    }
     return sums;
   }
 

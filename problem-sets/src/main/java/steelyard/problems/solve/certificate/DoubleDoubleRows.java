@@ -43,16 +43,7 @@ final class DoubleDoubleRows implements Rows {
   }
 
   @Override
-  public void eliminate(int k, int from, int to) {
-    normalize(k, from, to);
-    for (int i = 0; i < size; i++) {
-      if (i != k) {
-        eliminate(i, k, from, to);
-      }
-    }
-  }
-
-  private void normalize(int k, int from, int to) {
+  public void normalize(int k, int from, int to) {
     int pivotAt = k * size + k;
     DoubleDouble pivot = new DoubleDouble(high[pivotAt], low[pivotAt]);
     high[pivotAt] = 1;
@@ -64,7 +55,8 @@ final class DoubleDoubleRows implements Rows {
     }
   }
 
-  private void eliminate(int i, int k, int from, int to) {
+  @Override
+  public void eliminate(int i, int k, int from, int to) {
     double factorHigh = high[i * size + k];
     double factorLow = low[i * size + k];
     if (factorHigh == 0) {

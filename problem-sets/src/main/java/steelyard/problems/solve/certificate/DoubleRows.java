@@ -45,21 +45,22 @@ final class DoubleRows implements Rows {
   }
 
   @Override
-  public void eliminate(int k, int from, int to) {
-    double[] pivotRow = rows[k];
-    double pivot = pivotRow[k];
-    pivotRow[k] = 1;
+  public void normalize(int k, int from, int to) {
+    double[] row = rows[k];
+    double pivot = row[k];
+    row[k] = 1;
     for (int j = from; j < to; j++) {
-      pivotRow[j] /= pivot;
+      row[j] /= pivot;
     }
-    for (double[] row : rows) {
-      double factor = row[k];
-      if (row != pivotRow && factor != 0) {
-        row[k] = 0;
-        for (int j = from; j < to; j++) {
-          row[j] -= factor * pivotRow[j];
-        }
-      }
+  }
+
+  @Override
+  public void eliminate(int i, int k, int from, int to) {
+    double[] row = rows[i];
+    double factor = row[k];
+    row[k] = 0;
+    for (int j = from; j < to; j++) {
+      row[j] -= factor * rows[k][j];
     }
   }
 

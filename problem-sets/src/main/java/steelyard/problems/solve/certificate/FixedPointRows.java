@@ -40,16 +40,7 @@ final class FixedPointRows implements Rows {
   }
 
   @Override
-  public void eliminate(int k, int from, int to) {
-    normalize(k, from, to);
-    for (int i = 0; i < size; i++) {
-      if (i != k) {
-        eliminate(i, k, from, to);
-      }
-    }
-  }
-
-  private void normalize(int k, int from, int to) {
+  public void normalize(int k, int from, int to) {
     BigInteger pivot = entries[k * size + k];
     entries[k * size + k] = BigInteger.ONE.shiftLeft(fractionBits);
     for (int j = k * size + from; j < k * size + to; j++) {
@@ -57,7 +48,8 @@ final class FixedPointRows implements Rows {
     }
   }
 
-  private void eliminate(int i, int k, int from, int to) {
+  @Override
+  public void eliminate(int i, int k, int from, int to) {
     BigInteger factor = entries[i * size + k];
     if (factor.signum() == 0) {
       return;

@@ -27,7 +27,7 @@ final class GaussJordan {
         if (pivotRow[k] != k) {
           rows.swapRows(k, pivotRow[k]);
         }
-        rows.eliminate(k, from, to);
+        eliminate(rows, k, from, to);
       }
       rows.finish(from, to);
     }
@@ -38,6 +38,15 @@ final class GaussJordan {
       }
     }
     return true;
+  }
+
+  private static void eliminate(Rows rows, int k, int from, int to) {
+    rows.normalize(k, from, to);
+    for (int i = 0; i < rows.size(); i++) {
+      if (i != k) {
+        rows.eliminate(i, k, from, to);
+      }
+    }
   }
 
   private static int largest(Rows rows, int k) {

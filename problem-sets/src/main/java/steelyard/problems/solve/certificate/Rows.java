@@ -24,15 +24,20 @@ interface Rows {
   void swapColumns(int first, int second);
 
   /**
-   * Divides row k by its pivot, entry (k, k), whose place the pivot's reciprocal takes, and
-   * subtracts from every other row the new row k times the row's entry in column k, that entry
-   * taken as zero afterwards; in the columns of a panel only.
+   * Divides row k by its pivot, entry (k, k), and puts the pivot's reciprocal in its place; in the
+   * columns of a panel only.
    *
    * @param k the pivot's row and column
    * @param from the panel's first column
    * @param to the column after its last
    */
-  void eliminate(int k, int from, int to);
+  void normalize(int k, int from, int to);
+
+  /**
+   * Subtracts from row i the normalized row k times entry (i, k), having taken that entry as zero;
+   * in the columns of a panel only.
+   */
+  void eliminate(int i, int k, int from, int to);
 
   /** Does to the columns outside a panel what its steps did to those inside. */
   default void finish(int from, int to) {}
