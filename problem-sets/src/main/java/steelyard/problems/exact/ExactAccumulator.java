@@ -42,7 +42,9 @@ public final class ExactAccumulator {
 
   /** Returns the exact sum of terms. */
   public static Dyadic sum(double... terms) {
-    return ExactSums.of(terms).sum();
+    ExactAccumulator accumulator = new ExactAccumulator();
+    ExactSums.add(terms, accumulator, accumulator);
+    return accumulator.value();
   }
 
   /**
@@ -51,7 +53,9 @@ public final class ExactAccumulator {
    * @throws IllegalArgumentException if they differ in length
    */
   public static Dyadic dot(double[] x, double[] y) {
-    return ExactSums.ofProducts(x, y).sum();
+    ExactAccumulator accumulator = new ExactAccumulator();
+    ExactSums.addProducts(x, y, accumulator, accumulator);
+    return accumulator.value();
   }
 
   /**

@@ -10,8 +10,8 @@ public final class ExactSums {
   private static final int LEAST_FOR_LARGE = 8192;
   private static final int LEAST_FOR_PRODUCT_CHUNKS = 2048;
 
-  private final ExactAccumulator positive = new ExactAccumulator();
-  private final ExactAccumulator negative = new ExactAccumulator();
+  // Of what has a positive sign, and of what has a negative one.
+  private final ExactAccumulator[] bySign = {new ExactAccumulator(), new ExactAccumulator()};
 
   private ExactSums() {}
 
@@ -22,15 +22,7 @@ public final class ExactSums {
    */
   public static ExactSums of(double[] terms) {
     ExactSums sums = new ExactSums();
-    if (terms.length < LEAST_FOR_LARGE) {
-      for (double term : terms) {
-        (term < 0 ? sums.negative : sums.positive).add(term);
-      }
-    } else {
-      LargeAccumulator large = new LargeAccumulator(sums.positive, sums.negative);
-      large.add(terms);
-      large.drain();
-    }
+    add(terms, sums.bySign);
     return sums;
   }
 
@@ -41,6 +33,35 @@ public final class ExactSums {
    *     NaN
    */
   public static ExactSums ofProducts(double[] x, double[] y) {
+    ExactSums sums = new ExactSums();
+    addProducts(x, y, sums.bySign);
+    return sums;
+  }
+
+  /**
+   * Adds terms to one of two accumulators each, by their signs; the two may be the same.
+   *
+   * @throws IllegalArgumentException if a term is infinite or NaN
+   */
+  static void add(double[] terms, ExactAccumulator... bySign) {
+    if (terms.length < LEAST_FOR_LARGE) {
+      for (double term : terms) {
+        bySign[signBit(term)].add(term);
+      }
+    } else {
+      LargeAccumulator large = new LargeAccumulator(bySign);
+      large.add(terms);
+      large.drain();
+    }
+  }
+
+  /**
+   * Adds products to one of two accumulators each, by their signs; the two may be the same.
+   *
+   * @throws IllegalArgumentException if the vectors differ in length, or an entry is infinite or
+   *     NaN
+   */
+  static void addProducts(double[] x, double[] y, ExactAccumulator... bySign) {
     if (x.length != y.length) {
       throw new IllegalArgumentException(
           "two vectors of the same length are wanted, but they have "
@@ -49,28 +70,29 @@ public final class ExactSums {
               + y.length
               + " entries");
     }
-    ExactSums sums = new ExactSums();
     if (x.length < LEAST_FOR_PRODUCT_CHUNKS) {
       for (int i = 0; i < x.length; i++) {
-        boolean isNegative = Math.signum(x[i]) * Math.signum(y[i]) < 0;
-        (isNegative ? sums.negative : sums.positive).addProduct(x[i], y[i]);
+        bySign[signBit(x[i]) ^ signBit(y[i])].addProduct(x[i], y[i]);
       }
     } else {
-      ProductChunks.add(x, y, sums.positive, sums.negative);
+      ProductChunks.add(x, y, bySign);
     }
-    return sums;
+  }
+
+  private static int signBit(double value) {
+    return (int) (Double.doubleToRawLongBits(value) >>> 63);
   }
 
   /** Returns the sum. */
   public Dyadic sum() {
     ExactAccumulator both = new ExactAccumulator();
-    both.add(positive);
-    both.add(negative);
+    both.add(bySign[0]);
+    both.add(bySign[1]);
     return both.value();
   }
 
   /** Returns the sum of the absolute values. */
   public Dyadic absoluteSum() {
-    return positive.value().subtract(negative.value());
+    return bySign[0].value().subtract(bySign[1].value());
   }
 }

@@ -20,14 +20,12 @@ final class LargeAccumulator {
 
   private final long[] fractions = new long[CHUNKS];
   private final int[] termsLeft = new int[CHUNKS];
-  private final ExactAccumulator positive;
-  private final ExactAccumulator negative;
+  private final ExactAccumulator[] bySign;
 
-  /** Makes one that adds positive terms to one accumulator and negative ones to another. */
-  LargeAccumulator(ExactAccumulator positive, ExactAccumulator negative) {
+  /** Makes one that adds terms to two accumulators, by their signs. */
+  LargeAccumulator(ExactAccumulator... bySign) {
     Arrays.fill(termsLeft, CHUNK_TERMS);
-    this.positive = positive;
-    this.negative = negative;
+    this.bySign = bySign;
   }
 
   /** Adds terms. */
@@ -46,10 +44,10 @@ final class LargeAccumulator {
   }
 
   private void empty(int at) {
-    boolean isNegative = at >= NEGATIVE_CHUNKS;
+    int sign = at / NEGATIVE_CHUNKS;
     int field = at % NEGATIVE_CHUNKS;
     long hidden = field == 0 ? 0 : (long) (CHUNK_TERMS - termsLeft[at]) << FRACTION_BITS;
-    (isNegative ? negative : positive).addMultiple(hidden + fractions[at], field, isNegative);
+    bySign[sign].addMultiple(hidden + fractions[at], field, sign == 1);
     fractions[at] = 0;
     termsLeft[at] = CHUNK_TERMS;
   }

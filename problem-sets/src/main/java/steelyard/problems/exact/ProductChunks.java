@@ -31,19 +31,13 @@ final class ProductChunks {
   private ProductChunks() {}
 
   /** Adds products to two accumulators, by their signs. */
-  static void add(double[] x, double[] y, ExactAccumulator positive, ExactAccumulator negative) {
+  static void add(double[] x, double[] y, ExactAccumulator... bySign) {
     for (int from = 0; from < x.length; from += LARGEST_BLOCK) {
-      add(x, y, from, Math.min(x.length, from + LARGEST_BLOCK), positive, negative);
+      add(x, y, from, Math.min(x.length, from + LARGEST_BLOCK), bySign);
     }
   }
 
-  private static void add(
-      double[] x,
-      double[] y,
-      int from,
-      int to,
-      ExactAccumulator positive,
-      ExactAccumulator negative) {
+  private static void add(double[] x, double[] y, int from, int to, ExactAccumulator... bySign) {
     // Local, so that the compiler knows their lengths.
     long[] low = new long[2 * PLACES];
     long[] middle = new long[2 * PLACES];
@@ -55,7 +49,7 @@ final class ProductChunks {
       int yField = (int) (yBits >>> FRACTION_BITS) & EXPONENT_MASK;
       int sign = (int) ((xBits ^ yBits) >>> 63);
       if ((normality(xField) | normality(yField)) < 0) {
-        (sign == 0 ? positive : negative).addProduct(x[i], y[i]);
+        bySign[sign].addProduct(x[i], y[i]);
         continue;
       }
       int exponent = xField + yField;
@@ -71,8 +65,9 @@ final class ProductChunks {
       if ((low[place] | middle[place] | high[place]) == 0) {
         continue;
       }
-      boolean isNegative = place >= PLACES;
-      ExactAccumulator target = isNegative ? negative : positive;
+      int sign = place / PLACES;
+      boolean isNegative = sign == 1;
+      ExactAccumulator target = bySign[sign];
       int exponent = ((place % PLACES) << STEP_BITS) + LOWEST_EXPONENT;
       target.addInteger(low[place], exponent, isNegative);
       target.addInteger(middle[place], exponent + 32, isNegative);
