@@ -6,6 +6,7 @@ import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
 import java.time.Duration;
 import java.util.Collection;
+import java.util.List;
 import java.util.OptionalDouble;
 import org.openjdk.jmh.profile.GCProfiler;
 import org.openjdk.jmh.results.Result;
@@ -30,9 +31,8 @@ public final class JmhStopwatch implements Stopwatch {
    * otherwise a candidate that allocates is charged for pages that the system hands out for the
    * first time, several times its own time on a virtual machine.
    */
-  private static final String[] FORK_FLAGS = {
-    "-XX:+UseSerialGC", "-Xms96m", "-Xmn32m", "-XX:+AlwaysPreTouch"
-  };
+  private static final List<String> FORK_FLAGS =
+      List.of("-XX:+UseSerialGC", "-Xms96m", "-Xmn32m", "-XX:+AlwaysPreTouch");
 
   private static final long PAUSE_MS = 500;
   private static final double CONFIDENCE = 0.999;
@@ -47,6 +47,11 @@ public final class JmhStopwatch implements Stopwatch {
    */
   public JmhStopwatch(Duration patience) {
     this.patience = patience;
+  }
+
+  /** Returns the flags of the JVMs in which it measures, for who wants to compare with it. */
+  public static List<String> forkFlags() {
+    return FORK_FLAGS;
   }
 
   @Override
@@ -106,7 +111,7 @@ public final class JmhStopwatch implements Stopwatch {
   private static Options options(String task, String candidate, Path data, TimingEffort effort) {
     TimeValue iteration = TimeValue.milliseconds(effort.iterationMs());
     return new OptionsBuilder()
-        .jvmArgs(FORK_FLAGS)
+        .jvmArgs(FORK_FLAGS.toArray(String[]::new))
         .include("^" + KernelBenchmark.class.getName().replace(".", "\\.") + "\\.call$")
         .param("task", task)
         .param("candidate", candidate)

@@ -32,11 +32,7 @@ final class Generators {
 
   /** Calibrated cancelling vectors with their exact dot product. */
   static Supplier<?> dot(String[] words) {
-    Family<Vectors> family =
-        DotFamilies.all().stream()
-            .filter(each -> each.profile().id().equals("cancelling"))
-            .findFirst()
-            .orElseThrow();
+    Family<Vectors> family = Families.named("cancelling", DotFamilies.all());
     UniformRandomProvider random = RandomSource.XO_RO_SHI_RO_128_PP.create(7L);
     return () -> family.generate(new Family.Request(CONDITION, SIZE), random);
   }
@@ -63,7 +59,7 @@ final class Generators {
         sum = sum.add(product);
         absolute = absolute.add(product.abs());
       }
-      return sum;
+      return absolute.divide(sum.abs(), MathContext.DECIMAL64);
     };
   }
 }

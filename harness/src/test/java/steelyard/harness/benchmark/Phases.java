@@ -11,6 +11,7 @@ import steelyard.algorithms.sum.Summations;
 import steelyard.harness.run.AccuracyPhase;
 import steelyard.harness.run.Assignment;
 import steelyard.harness.run.Interruption;
+import steelyard.harness.run.Progress;
 import steelyard.harness.task.Task;
 import steelyard.harness.task.Tasks;
 import steelyard.problems.Family;
@@ -32,11 +33,7 @@ final class Phases {
   @SuppressWarnings("unchecked")
   private static List<Assignment<?, ?>> assignments() {
     Task<Summation, Terms> task = (Task<Summation, Terms>) Tasks.find("sum").orElseThrow();
-    Family<Terms> family =
-        SumFamilies.all().stream()
-            .filter(each -> each.profile().id().equals("cancelling"))
-            .findFirst()
-            .orElseThrow();
+    Family<Terms> family = Families.named("cancelling", SumFamilies.all());
     List<Assignment<?, ?>> assignments = new ArrayList<>();
     for (int repeat = 1; repeat <= PROBLEMS; repeat++) {
       ProblemId id =
@@ -50,9 +47,7 @@ final class Phases {
   static Supplier<?> whole(String[] words) {
     int threads = Integer.parseInt(words[1]);
     List<Assignment<?, ?>> assignments = assignments();
-    return () ->
-        new AccuracyPhase(threads, (phase, step, done, all) -> {}, new Interruption())
-            .run(assignments);
+    return () -> new AccuracyPhase(threads, Progress.SILENT, new Interruption()).run(assignments);
   }
 
   /** The calls of the candidates, as often as the phase makes them, and the references. */

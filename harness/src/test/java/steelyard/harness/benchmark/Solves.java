@@ -20,11 +20,7 @@ final class Solves {
   private Solves() {}
 
   static LinearSystem system(String[] words) {
-    Family<LinearSystem> family =
-        SystemFamilies.all().stream()
-            .filter(each -> each.profile().id().equals(words[1]))
-            .findFirst()
-            .orElseThrow();
+    Family<LinearSystem> family = Families.named(words[1], SystemFamilies.all());
     Family.Request request =
         new Family.Request(Double.parseDouble(words[2]), Integer.parseInt(words[3]));
     return family.generate(request, RandomSource.XO_RO_SHI_RO_128_PP.create(5L)).data();

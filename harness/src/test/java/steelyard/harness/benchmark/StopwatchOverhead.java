@@ -73,7 +73,7 @@ final class StopwatchOverhead {
             new OptionsBuilder()
                 .include(HandWritten.class.getName().replace(".", "\\.") + ".sum")
                 .param("size", String.valueOf(size))
-                .jvmArgs("-XX:+UseSerialGC", "-Xms96m", "-Xmn32m", "-XX:+AlwaysPreTouch")
+                .jvmArgs(JmhStopwatch.forkFlags().toArray(String[]::new))
                 .forks(1)
                 .warmupIterations(4)
                 .warmupTime(TimeValue.milliseconds(300))

@@ -5,9 +5,6 @@ package steelyard.problems.solve.certificate;
  * {@link InverseBounds} and {@link Refinement} know of an arithmetic.
  */
 interface ApproximateInverse {
-  /** Returns n. */
-  int size();
-
   /**
    * Returns upper bounds on the row sums of |I - R A|, rounding errors of their own computation
    * included; a NaN or an infinity where overflow left nothing proved.

@@ -12,8 +12,8 @@ import steelyard.problems.solve.rational.PadicLifting;
  * numbers, which takes minutes where n is 200 and is not tried beyond. Which one that is follows
  * from the outcome of {@link Certificate} alone.
  *
- * <p>After scaling, double reaches condition numbers of about 1e13, double-double about 1e26 and
- * fixed point about 1e280; rational numbers have no limit but that of the range of double.
+ * <p>After scaling, double reaches condition numbers of about 1e13 and double-double about 1e26;
+ * fixed point is tested up to 1e234, and rational numbers have no limit but the range of double.
  */
 public final class CertifiedSolver {
   private static final int LARGEST_PRECISION = 1024;

@@ -27,8 +27,7 @@ import steelyard.problems.exact.ErrorFree;
  */
 final class DoubleDoubleInverse implements ApproximateInverse {
   private final int size;
-  private final double[] matrix;
-  private final double[][] rows;
+  private final ScaledSystem system;
   private final double[] high;
   private final double[] low;
   private final Allowances allowances;
@@ -37,8 +36,7 @@ final class DoubleDoubleInverse implements ApproximateInverse {
   DoubleDoubleInverse(ScaledSystem system, double[] high, double[] low, Allowances allowances) {
     this.allowances = allowances;
     size = system.size;
-    matrix = system.matrix;
-    rows = system.rows();
+    this.system = system;
     this.high = high;
     this.low = low;
     for (int i = 0; i < high.length; i++) {
@@ -66,13 +64,8 @@ final class DoubleDoubleInverse implements ApproximateInverse {
   }
 
   @Override
-  public int size() {
-    return size;
-  }
-
-  @Override
   public double[] residualRowSums() {
-    double[] rowSums = DoubleInverse.absoluteRowSums(rows);
+    double[] rowSums = system.absoluteRowSums();
     double[] sum = new double[size];
     double[] errors = new double[size];
     double[] bounds = new double[size];
@@ -100,6 +93,7 @@ final class DoubleDoubleInverse implements ApproximateInverse {
   }
 
   private void accumulate(double factor, int row, double[] sum, double[] errors) {
+    double[] matrix = system.matrix;
     for (int j = 0; j < size; j++) {
       double x = matrix[row + j];
       double product = factor * x;

@@ -16,7 +16,7 @@ import java.util.Optional;
  */
 final class DoubleInverse implements ApproximateInverse {
   private final int size;
-  private final double[][] matrix;
+  private final ScaledSystem system;
   private final double[][] inverse;
 
   private final Allowances allowances;
@@ -24,7 +24,7 @@ final class DoubleInverse implements ApproximateInverse {
   DoubleInverse(ScaledSystem system, double[][] inverse, Allowances allowances) {
     this.allowances = allowances;
     size = system.size;
-    matrix = system.rows();
+    this.system = system;
     this.inverse = inverse;
   }
 
@@ -45,15 +45,10 @@ final class DoubleInverse implements ApproximateInverse {
   }
 
   @Override
-  public int size() {
-    return size;
-  }
-
-  @Override
   public double[] residualRowSums() {
-    double[] rowSums = absoluteRowSums(matrix);
+    double[] rowSums = system.absoluteRowSums();
     double[][] product = new double[size][size];
-    ProductRows.multiply(inverse, matrix, product);
+    ProductRows.multiply(inverse, system.rows(), product);
     double[] bounds = new double[size];
     for (int i = 0; i < size; i++) {
       double magnitude = 0;
@@ -98,15 +93,5 @@ final class DoubleInverse implements ApproximateInverse {
       }
     }
     return new double[][] {product};
-  }
-
-  static double[] absoluteRowSums(double[][] rows) {
-    double[] sums = new double[rows.length];
-    for (int i = 0; i < sums.length; i++) {
-      for (double entry : rows[i]) {
-        sums[i] += Math.abs(entry);
-      }
-    }
-    return sums;
   }
 }

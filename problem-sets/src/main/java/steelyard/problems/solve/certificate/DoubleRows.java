@@ -71,7 +71,7 @@ final class DoubleRows implements Rows {
   public void finish(int from, int to) {
     double[][] panel = new double[PANEL_WIDTH][size()];
     for (int k = from; k < to; k++) {
-      panel[k - from] = rows[k].clone();
+      System.arraycopy(rows[k], 0, panel[k - from], 0, size());
     }
     double[] factors = new double[PANEL_WIDTH];
     for (int i = 0; i < size(); i++) {

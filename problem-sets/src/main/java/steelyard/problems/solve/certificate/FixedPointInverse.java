@@ -52,11 +52,6 @@ final class FixedPointInverse implements ApproximateInverse {
   }
 
   @Override
-  public int size() {
-    return size;
-  }
-
-  @Override
   public double[] residualRowSums() {
     double[] bounds = new double[size];
     int shift = matrix.exponent() - fractionBits;

@@ -11,18 +11,16 @@ final class ProductRows {
   static void multiply(double[][] left, double[][] right, double[][] result) {
     int n = left.length;
     double[] zero = new double[n];
+    double[] unused = new double[n];
     for (int i = 0; i < n; i += 2) {
-      boolean single = i + 1 == n;
+      boolean isPair = i + 1 < n;
+      double[] below = isPair ? left[i + 1] : zero;
+      double[] resultBelow = isPair ? result[i + 1] : unused;
       for (int k = 0; k < n; k += 4) {
-        double[] r0 = right[k];
         double[] r1 = k + 1 < n ? right[k + 1] : zero;
         double[] r2 = k + 2 < n ? right[k + 2] : zero;
         double[] r3 = k + 3 < n ? right[k + 3] : zero;
-        if (single) {
-          one(left[i], k, r0, r1, r2, r3, result[i]);
-        } else {
-          two(left[i], left[i + 1], k, r0, r1, r2, r3, result[i], result[i + 1]);
-        }
+        add(left[i], below, k, right[k], r1, r2, r3, result[i], resultBelow);
       }
     }
   }
@@ -31,18 +29,8 @@ final class ProductRows {
     return k < row.length ? row[k] : 0;
   }
 
-  private static void one(
-      double[] left, int k, double[] r0, double[] r1, double[] r2, double[] r3, double[] sum) {
-    double f0 = left[k];
-    double f1 = at(left, k + 1);
-    double f2 = at(left, k + 2);
-    double f3 = at(left, k + 3);
-    for (int j = 0; j < sum.length; j++) {
-      sum[j] += (f0 * r0[j] + f1 * r1[j]) + (f2 * r2[j] + f3 * r3[j]);
-    }
-  }
-
-  private static void two(
+  // Two rows at a time, so that each entry that is loaded serves both.
+  private static void add(
       double[] leftA,
       double[] leftB,
       int k,

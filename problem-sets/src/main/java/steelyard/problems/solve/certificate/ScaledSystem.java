@@ -59,6 +59,17 @@ final class ScaledSystem {
     return rows;
   }
 
+  /** Returns the sums of the magnitudes in each row, computed in double. */
+  double[] absoluteRowSums() {
+    double[] sums = new double[size];
+    for (int i = 0; i < size; i++) {
+      for (int j = 0; j < size; j++) {
+        sums[i] += Math.abs(matrix[i * size + j]);
+      }
+    }
+    return sums;
+  }
+
   /** Returns the least m with |x| &lt; 2^m; the least int for zero. */
   static int magnitude(double x) {
     if (x == 0) {

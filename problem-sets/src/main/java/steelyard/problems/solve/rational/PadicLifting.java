@@ -25,11 +25,13 @@ public final class PadicLifting {
 
   private final IntegerRows matrix;
   private final PrimeField field;
+  private final BigInteger prime;
   private final long[][] inverse;
 
   private PadicLifting(IntegerRows matrix, PrimeField field, long[][] inverse) {
     this.matrix = matrix;
     this.field = field;
+    prime = BigInteger.valueOf(field.prime());
     this.inverse = inverse;
   }
 
@@ -83,7 +85,7 @@ public final class PadicLifting {
   private RationalVector solve(BigInteger[] b) {
     BigInteger[] rest = b.clone();
     PadicNumber[] x = new PadicNumber[b.length];
-    Arrays.setAll(x, i -> new PadicNumber(field.prime()));
+    Arrays.setAll(x, i -> new PadicNumber(prime));
     int wanted = FIRST_DIGITS;
     for (int count = 0; ; wanted *= 2) {
       for (; count < wanted; count++) {
@@ -93,7 +95,7 @@ public final class PadicLifting {
         }
         subtract(digits, rest);
       }
-      BigInteger modulus = BigInteger.valueOf(field.prime()).pow(count);
+      BigInteger modulus = prime.pow(count);
       BigInteger[] residues = Arrays.stream(x).map(PadicNumber::value).toArray(BigInteger[]::new);
       Optional<RationalVector> found =
           new Reconstruction(modulus).vector(residues).filter(v -> isSolution(v, b));
@@ -104,7 +106,6 @@ public final class PadicLifting {
   }
 
   private long[] digits(BigInteger[] rest) {
-    BigInteger prime = BigInteger.valueOf(field.prime());
     long[] residues = new long[rest.length];
     for (int i = 0; i < rest.length; i++) {
       residues[i] = rest[i].mod(prime).longValue();
@@ -117,7 +118,6 @@ public final class PadicLifting {
   }
 
   private void subtract(long[] digits, BigInteger[] rest) {
-    BigInteger prime = BigInteger.valueOf(field.prime());
     for (int i = 0; i < rest.length; i++) {
       rest[i] = rest[i].subtract(matrix.times(i, digits)).divide(prime);
     }

@@ -11,8 +11,8 @@ final class PadicNumber {
   private final BigInteger base;
   private final List<Integer> digits = new ArrayList<>();
 
-  PadicNumber(long base) {
-    this.base = BigInteger.valueOf(base);
+  PadicNumber(BigInteger base) {
+    this.base = base;
   }
 
   void append(long digit) {

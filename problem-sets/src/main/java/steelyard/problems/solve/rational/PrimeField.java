@@ -1,15 +1,15 @@
 package steelyard.problems.solve.rational;
 
 /**
- * Arithmetic modulo a prime below 2^28, so that 128 products of residues add up in a long.
+ * Arithmetic modulo a prime below 2^28, so that many products of residues add up in a long.
  *
  * @param prime p
  */
 record PrimeField(long prime) {
   static final int BITS = 28;
 
-  /** How many products of two residues add up to less than 2^63. */
-  static final int PRODUCTS_IN_LONG = 128;
+  // So many products of two residues, and one residue more, add up to less than 2^63.
+  private static final int PRODUCTS_AT_ONCE = 127;
 
   /** Returns the field of the largest prime below 2^28. */
   static PrimeField largest() {
@@ -59,8 +59,8 @@ record PrimeField(long prime) {
   /** Returns the residue of a dot product of residues. */
   long dot(long[] x, long[] y) {
     long sum = 0;
-    for (int from = 0; from < x.length; from += PRODUCTS_IN_LONG - 1) {
-      int to = Math.min(x.length, from + PRODUCTS_IN_LONG - 1);
+    for (int from = 0; from < x.length; from += PRODUCTS_AT_ONCE) {
+      int to = Math.min(x.length, from + PRODUCTS_AT_ONCE);
       for (int j = from; j < to; j++) {
         sum += x[j] * y[j];
       }

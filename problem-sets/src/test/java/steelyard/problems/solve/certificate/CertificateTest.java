@@ -24,11 +24,6 @@ class CertificateTest {
       ApproximateInverse original, double[] residualRowSums, double[] magnitudes, double factor)
       implements ApproximateInverse {
     @Override
-    public int size() {
-      return original.size();
-    }
-
-    @Override
     public int parts() {
       return original.parts();
     }

@@ -13,29 +13,6 @@ import steelyard.problems.exact.Dyadic;
 class InverseBoundsTest {
   private static final int SIZE = 300;
 
-  /** An approximate inverse that is exact and has given entries. */
-  private record Given(double[] magnitudes) implements ApproximateInverse {
-    @Override
-    public int size() {
-      return SIZE;
-    }
-
-    @Override
-    public double[] residualRowSums() {
-      return new double[SIZE];
-    }
-
-    @Override
-    public int parts() {
-      return 1;
-    }
-
-    @Override
-    public double[][] times(double[][] v) {
-      throw new UnsupportedOperationException();
-    }
-  }
-
   @Test
   void boundsCoverRoundingDown() {
     // Each term but the first is lost.
@@ -59,8 +36,7 @@ class InverseBoundsTest {
   }
 
   // With A = 1 and R = 1/2 the row sum of |I - R A| is 1/2, and |A⁻¹| v = v is attained: neither
-  // the
-  // geometric series nor the row sum may be smaller by any factor.
+  // the geometric series nor the row sum may be smaller by any factor.
   @Test
   void boundIsAttainedByAHalvedInverse() {
     double[] half = {0.5};
@@ -90,7 +66,7 @@ class InverseBoundsTest {
         Dyadic.of(first)
             .add(Dyadic.of(others).multiply(Dyadic.of(SIZE - 1L)))
             .multiply(Dyadic.of(entry));
-    InverseBounds bounds = new InverseBounds(new Given(magnitudes));
+    InverseBounds bounds = new InverseBounds(magnitudes, new double[SIZE], Allowances.PROVEN);
     double[] v = new double[SIZE];
     Arrays.fill(v, entry);
     Enclosure[] enclosed = new Enclosure[SIZE];
