@@ -43,4 +43,13 @@ public interface Task<K, D extends Data> {
   default int elements(D data) {
     return 1;
   }
+
+  /**
+   * Returns this task with candidates beside its own.
+   *
+   * @throws IllegalArgumentException if two have the same id
+   */
+  default Task<K, D> with(List<Candidate<K>> more) {
+    return more.isEmpty() ? this : new Enlarged<>(this, more);
+  }
 }
