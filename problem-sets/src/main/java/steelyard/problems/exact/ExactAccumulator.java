@@ -54,7 +54,7 @@ public final class ExactAccumulator {
    */
   public static Dyadic dot(double[] x, double[] y) {
     ExactAccumulator accumulator = new ExactAccumulator();
-    ExactSums.addProducts(x, y, accumulator, accumulator);
+    accumulator.addProducts(x, y);
     return accumulator.value();
   }
 
@@ -108,6 +108,16 @@ public final class ExactAccumulator {
     } else {
       addIntegerProduct(x, y);
     }
+  }
+
+  /**
+   * Adds the products of the entries of two vectors, exactly, whatever their size.
+   *
+   * @throws IllegalArgumentException if the vectors differ in length, or an entry is infinite or
+   *     NaN
+   */
+  public void addProducts(double[] x, double[] y) {
+    ExactSums.addProducts(x, y, this, this);
   }
 
   /**

@@ -8,12 +8,13 @@ public final class ExactSums {
 
   // From here on looking through many chunks costs less than they save.
   private static final int LEAST_FOR_LARGE = 8192;
-  private static final int LEAST_FOR_PRODUCT_CHUNKS = 2048;
+  private static final int LEAST_FOR_PRODUCT_CHUNKS = 64;
 
   // Of what has a positive sign, and of what has a negative one.
   private final ExactAccumulator[] bySign = {new ExactAccumulator(), new ExactAccumulator()};
 
-  private ExactSums() {}
+  /** Makes sums of nothing. */
+  public ExactSums() {}
 
   /**
    * Adds up terms.
@@ -34,8 +35,18 @@ public final class ExactSums {
    */
   public static ExactSums ofProducts(double[] x, double[] y) {
     ExactSums sums = new ExactSums();
-    addProducts(x, y, sums.bySign);
+    sums.addProducts(x, y);
     return sums;
+  }
+
+  /**
+   * Adds the products of the entries of two vectors, whatever their size.
+   *
+   * @throws IllegalArgumentException if the vectors differ in length, or an entry is infinite or
+   *     NaN
+   */
+  public void addProducts(double[] x, double[] y) {
+    addProducts(x, y, bySign);
   }
 
   /**
@@ -85,10 +96,15 @@ public final class ExactSums {
 
   /** Returns the sum. */
   public Dyadic sum() {
+    return accumulated().value();
+  }
+
+  /** Returns an accumulator of its own that holds the sum. */
+  public ExactAccumulator accumulated() {
     ExactAccumulator both = new ExactAccumulator();
     both.add(bySign[0]);
     both.add(bySign[1]);
-    return both.value();
+    return both;
   }
 
   /** Returns the sum of the absolute values. */

@@ -28,51 +28,91 @@ final class ProductChunks {
   // The upper half of a product has 49 bits, so that as many fit a long.
   private static final int LARGEST_BLOCK = 1 << 14;
 
+  // To make chunks for each vector would cost as much as several hundred products.
+  private static final ThreadLocal<ProductChunks> OWN = ThreadLocal.withInitial(ProductChunks::new);
+
+  private final long[] lows = new long[2 * PLACES];
+  private final long[] middles = new long[2 * PLACES];
+  private final long[] highs = new long[2 * PLACES];
+
   private ProductChunks() {}
 
   /** Adds products to two accumulators, by their signs. */
   static void add(double[] x, double[] y, ExactAccumulator... bySign) {
+    ProductChunks chunks = OWN.get();
     for (int from = 0; from < x.length; from += LARGEST_BLOCK) {
-      add(x, y, from, Math.min(x.length, from + LARGEST_BLOCK), bySign);
+      chunks.add(x, y, from, Math.min(x.length, from + LARGEST_BLOCK), bySign);
     }
   }
 
-  private static void add(double[] x, double[] y, int from, int to, ExactAccumulator... bySign) {
-    // Local, so that the compiler knows their lengths.
-    long[] low = new long[2 * PLACES];
-    long[] middle = new long[2 * PLACES];
-    long[] high = new long[2 * PLACES];
+  private void add(double[] x, double[] y, int from, int to, ExactAccumulator... bySign) {
+    long[] low = lows;
+    long[] middle = middles;
+    long[] high = highs;
+    if (low.length <= PLACE_MASK || middle.length <= PLACE_MASK || high.length <= PLACE_MASK) {
+      // Never so, but the compiler does not know it before, and checks every index.
+      throw new IllegalStateException();
+    }
+    int least = Integer.MAX_VALUE;
+    int greatest = 0;
+    boolean special = false;
     for (int i = from; i < to; i++) {
       long xBits = Double.doubleToRawLongBits(x[i]);
       long yBits = Double.doubleToRawLongBits(y[i]);
       int xField = (int) (xBits >>> FRACTION_BITS) & EXPONENT_MASK;
       int yField = (int) (yBits >>> FRACTION_BITS) & EXPONENT_MASK;
-      int sign = (int) ((xBits ^ yBits) >>> 63);
       if ((normality(xField) | normality(yField)) < 0) {
-        bySign[sign].addProduct(x[i], y[i]);
+        special = true;
         continue;
       }
       int exponent = xField + yField;
+      least = Math.min(least, exponent);
+      greatest = Math.max(greatest, exponent);
       long left = ((xBits & (IMPLICIT_BIT - 1)) | IMPLICIT_BIT) << (exponent & STEP_MASK);
       long right = (yBits & (IMPLICIT_BIT - 1)) | IMPLICIT_BIT;
       long product = left * right;
+      int sign = (int) ((xBits ^ yBits) >>> 63);
       int place = ((exponent >>> STEP_BITS) + sign * PLACES) & PLACE_MASK;
       low[place] += product & 0xffff_ffffL;
       middle[place] += product >>> 32;
       high[place] += Math.multiplyHigh(left, right);
     }
-    for (int place = 0; place < 2 * PLACES; place++) {
-      if ((low[place] | middle[place] | high[place]) == 0) {
-        continue;
-      }
-      int sign = place / PLACES;
-      boolean isNegative = sign == 1;
-      ExactAccumulator target = bySign[sign];
-      int exponent = ((place % PLACES) << STEP_BITS) + LOWEST_EXPONENT;
-      target.addInteger(low[place], exponent, isNegative);
-      target.addInteger(middle[place], exponent + 32, isNegative);
-      target.addInteger(high[place], exponent + 64, isNegative);
+    for (int place = least >>> STEP_BITS; place <= greatest >>> STEP_BITS; place++) {
+      empty(place, false, bySign[0]);
+      empty(place, true, bySign[1]);
     }
+    if (special) {
+      addSpecial(x, y, from, to, bySign);
+    }
+  }
+
+  private void empty(int exponentPlace, boolean isNegative, ExactAccumulator target) {
+    int place = isNegative ? exponentPlace + PLACES : exponentPlace;
+    if ((lows[place] | middles[place] | highs[place]) == 0) {
+      return;
+    }
+    int exponent = (exponentPlace << STEP_BITS) + LOWEST_EXPONENT;
+    target.addInteger(lows[place], exponent, isNegative);
+    target.addInteger(middles[place], exponent + 32, isNegative);
+    target.addInteger(highs[place], exponent + 64, isNegative);
+    lows[place] = 0;
+    middles[place] = 0;
+    highs[place] = 0;
+  }
+
+  private static void addSpecial(
+      double[] x, double[] y, int from, int to, ExactAccumulator... bySign) {
+    for (int i = from; i < to; i++) {
+      if (isSpecial(x[i]) || isSpecial(y[i])) {
+        int sign =
+            (int) ((Double.doubleToRawLongBits(x[i]) ^ Double.doubleToRawLongBits(y[i])) >>> 63);
+        bySign[sign].addProduct(x[i], y[i]);
+      }
+    }
+  }
+
+  private static boolean isSpecial(double value) {
+    return normality(Math.getExponent(value) + Double.MAX_EXPONENT) < 0;
   }
 
   // Negative for the fields of zero, subnormal numbers, infinities and NaN.

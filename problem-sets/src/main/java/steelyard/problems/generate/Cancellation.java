@@ -32,6 +32,9 @@ public final class Cancellation {
      */
     void enter(Dyadic numerator, Dyadic denominator);
 
+    /** Returns the sum of the contributions so far, correctly rounded. */
+    double roundedSum();
+
     /** Returns the exact sum of the contributions so far. */
     Dyadic sum();
 
@@ -89,11 +92,10 @@ public final class Cancellation {
     }
     int levels = Math.max(needed, Math.min(count / 2, usefulLevels()));
     enterRandom(count - levels);
-    Dyadic top = ledger.absoluteSum();
+    double top = ledger.absoluteSum().doubleValue();
     for (int level = 1; level < levels; level++) {
       int depth = (int) Math.rint(bits * level / levels);
-      Dyadic rest = Dyadic.of(Draw.signed(random, -depth)).multiply(top);
-      ledger.enter(rest.subtract(ledger.sum()), Dyadic.ONE);
+      ledger.enter(Draw.signed(random, -depth) * top - ledger.roundedSum());
     }
     enterLast();
   }

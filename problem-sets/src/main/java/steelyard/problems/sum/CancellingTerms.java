@@ -38,6 +38,11 @@ final class CancellingTerms implements Cancellation.Ledger {
   }
 
   @Override
+  public double roundedSum() {
+    return sum.round();
+  }
+
+  @Override
   public Dyadic sum() {
     return sum.value();
   }

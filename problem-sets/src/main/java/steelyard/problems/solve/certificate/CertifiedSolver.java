@@ -12,7 +12,7 @@ import steelyard.problems.solve.rational.PadicLifting;
  * numbers, which takes minutes where n is 200 and is not tried beyond. Which one that is follows
  * from the outcome of {@link Certificate} alone.
  *
- * <p>After scaling, double reaches condition numbers of about 1e13 and double-double about 1e26;
+ * <p>After scaling, double reaches condition numbers of about 1e13 and double-double about 1e29;
  * fixed point is tested up to 1e234, and rational numbers have no limit but the range of double.
  */
 public final class CertifiedSolver {

@@ -7,47 +7,49 @@ import steelyard.problems.exact.ErrorFree;
 /**
  * An approximate inverse R = H + L in double-double, where |L| &lt;= 2^-52 |H|.
  *
- * <p>An entry of I - R A is a dot product of m = 2n + 1 products of doubles, evaluated with
- * compensation (Ogita, Rump and Oishi, Accurate sum and dot product, SIAM J. Sci. Comput. 26
- * (2005), 1955-1988, Algorithm Dot2): each product and each sum is split without error into its
- * rounded value and its rounding error, and the errors are summed in double. With S = |I| + (|H| +
- * |L|) |A|:
- *
- * <ul>
- *   <li>the errors of the products amount to at most u S, those of the running sums to at most
- *       &gamma;_{m-1} (1 + u) S, so that the sum of the errors is itself computed with an error of
- *       at most &gamma;_{2m} (u + &gamma;_{m-1} (1 + u)) S &lt;= &gamma;_{2m}² S;
- *   <li>adding it to the rounded sum costs at most u times the magnitude of the result.
- * </ul>
- *
- * <p>Hence a row sum of |I - R A| is at most (1 + u) times that of the computed results plus
- * &gamma;_{2m}² times that of S; |I| + (1 + 2^-51) |H| |A| is used for S. The error of a product
- * that underflows is lost by at most 2^-1074, so that n m 2^-1074 is added. The bounds are
- * evaluated in double with the allowances of {@link DoubleInverse}.
+ * <p>The entries of R A - I are evaluated by {@link TwofoldProduct}, to whose bound each adds its
+ * final rounding, of at most u times its own magnitude. With S = |I| + |H| |A|, a row sum of |I - R
+ * A| is therefore at most (1 + u) times that of the computed entries plus &gamma;_e &gamma;_{d+4}
+ * times that of S, plus 3 n² 2^-1074 for products that underflow. The bounds are evaluated in
+ * double with the allowances of {@link DoubleInverse}.
  */
 final class DoubleDoubleInverse implements ApproximateInverse {
   private final int size;
   private final ScaledSystem system;
-  private final double[] high;
-  private final double[] low;
-  private final Allowances allowances;
+  private final double[][] high;
+  private final double[][] low;
+  private final double[][] product;
+  private final double[] residualRowSums;
 
   /** Makes one of two matrices, which are split anew so that |L| is at most 2^-53 |H|. */
-  DoubleDoubleInverse(ScaledSystem system, double[] high, double[] low, Allowances allowances) {
-    this.allowances = allowances;
+  DoubleDoubleInverse(ScaledSystem system, double[][] high, double[][] low, Allowances allowances) {
     size = system.size;
     this.system = system;
     this.high = high;
     this.low = low;
-    for (int i = 0; i < high.length; i++) {
-      double sum = high[i] + low[i];
-      low[i] = ErrorFree.sumError(high[i], low[i]);
-      high[i] = sum;
+    for (int i = 0; i < size; i++) {
+      for (int j = 0; j < size; j++) {
+        double sum = high[i][j] + low[i][j];
+        low[i][j] = ErrorFree.sumError(high[i][j], low[i][j]);
+        high[i][j] = sum;
+      }
     }
+    product = new double[size][size];
+    residualRowSums = multiply(allowances);
   }
 
-  /** The route that makes it. */
+  /**
+   * The route that makes it: the inverse in double, multiplied from the left by the inverse in
+   * double of its product with A, as often as that helps. Each time the product is better
+   * conditioned, by nearly as much as double resolves, until R lacks the bits for it.
+   *
+   * @see "S. M. Rump, Inversion of extremely ill-conditioned matrices in floating-point, Japan
+   *     Journal of Industrial and Applied Mathematics 26 (2009), 249-277"
+   */
   static final class DoubleDoubleRoute implements Route {
+    private static final int LARGEST_STEPS = 4;
+    private static final double CLOSE_ENOUGH = 0x1p-12;
+
     @Override
     public String name() {
       return "double-double";
@@ -55,61 +57,91 @@ final class DoubleDoubleInverse implements ApproximateInverse {
 
     @Override
     public Optional<ApproximateInverse> invert(ScaledSystem system) {
-      double[] high = system.matrix.clone();
-      double[] low = new double[high.length];
-      return GaussJordan.invert(new DoubleDoubleRows(system.size, high, low))
-          ? Optional.of(new DoubleDoubleInverse(system, high, low, Allowances.PROVEN))
+      double[][] inverse = system.rows();
+      return GaussJordan.invert(new DoubleRows(inverse))
+          ? Optional.of(improved(of(system, inverse, new double[system.size][system.size])))
           : Optional.empty();
     }
+
+    private static DoubleDoubleInverse improved(DoubleDoubleInverse first) {
+      DoubleDoubleInverse best = first;
+      for (int step = 0; step < LARGEST_STEPS && !(best.distance() < CLOSE_ENOUGH); step++) {
+        Optional<DoubleDoubleInverse> next = best.improved();
+        // The first product may be farther from I than that of any other matrix.
+        if (next.isEmpty() || (step > 0 && !(next.get().distance() < best.distance()))) {
+          break;
+        }
+        best = next.get();
+      }
+      return best;
+    }
+  }
+
+  private static DoubleDoubleInverse of(ScaledSystem system, double[][] high, double[][] low) {
+    return new DoubleDoubleInverse(system, high, low, Allowances.PROVEN);
+  }
+
+  private double distance() {
+    return Arrays.stream(residualRowSums).max().orElse(0);
+  }
+
+  private Optional<DoubleDoubleInverse> improved() {
+    double[][] factors = Arrays.stream(product).map(double[]::clone).toArray(double[][]::new);
+    if (!GaussJordan.invert(new DoubleRows(factors))) {
+      return Optional.empty();
+    }
+    double[][] betterHigh = new double[size][size];
+    double[][] betterLow = new double[size][size];
+    TwofoldProduct twofold = new TwofoldProduct(size);
+    for (int i = 0; i < size; i++) {
+      TwofoldRow row = twofold.row(factors[i], high, low);
+      for (int j = 0; j < size; j++) {
+        betterHigh[i][j] = row.rounded(j);
+        betterLow[i][j] = row.rest(j);
+      }
+    }
+    return Optional.of(of(system, betterHigh, betterLow));
   }
 
   @Override
   public double[] residualRowSums() {
+    return residualRowSums.clone();
+  }
+
+  // Stores R A, and returns the bounds on the row sums of |I - R A|.
+  private double[] multiply(Allowances allowances) {
+    double[][] matrix = system.rows();
     double[] rowSums = system.absoluteRowSums();
-    double[] sum = new double[size];
-    double[] errors = new double[size];
+    TwofoldProduct twofold = new TwofoldProduct(size);
+    double rounding =
+        allowances.gamma(TwofoldProduct.sums(size) + 4)
+            * allowances.gamma(TwofoldProduct.corrections(size));
     double[] bounds = new double[size];
-    double gamma = allowances.gamma(2 * (2 * size + 1));
     for (int i = 0; i < size; i++) {
-      Arrays.fill(sum, 0);
-      Arrays.fill(errors, 0);
-      sum[i] = -1;
+      TwofoldRow row = twofold.row(i, -1, high[i], low[i], matrix);
       double magnitude = 1;
-      for (int k = 0; k < size; k++) {
-        magnitude += Math.abs(high[i * size + k]) * rowSums[k];
-        accumulate(high[i * size + k], k * size, sum, errors);
-        accumulate(low[i * size + k], k * size, sum, errors);
-      }
       double distance = 0;
       for (int j = 0; j < size; j++) {
-        distance += Math.abs(sum[j] + errors[j]);
+        magnitude += Math.abs(high[i][j]) * rowSums[j];
+        product[i][j] = row.rounded(j);
+        distance += Math.abs(product[i][j]);
       }
+      product[i][i] += 1;
       bounds[i] =
-          (distance + gamma * gamma * magnitude) * allowances.inflation(size)
+          (distance + rounding * magnitude) * allowances.inflation(size)
               + 3.0 * size * size * allowances.underflow();
       bounds[i] = Math.nextUp(bounds[i]);
     }
     return bounds;
   }
 
-  private void accumulate(double factor, int row, double[] sum, double[] errors) {
-    double[] matrix = system.matrix;
-    for (int j = 0; j < size; j++) {
-      double x = matrix[row + j];
-      double product = factor * x;
-      double before = sum[j];
-      double after = before + product;
-      double part = after - before;
-      sum[j] = after;
-      errors[j] += ((before - (after - part)) + (product - part)) + Math.fma(factor, x, -product);
-    }
-  }
-
   @Override
   public double[] magnitudes() {
-    double[] magnitudes = new double[high.length];
-    for (int i = 0; i < high.length; i++) {
-      magnitudes[i] = Math.abs(high[i]);
+    double[] magnitudes = new double[size * size];
+    for (int i = 0; i < size; i++) {
+      for (int j = 0; j < size; j++) {
+        magnitudes[i * size + j] = Math.abs(high[i][j]);
+      }
     }
     return magnitudes;
   }
@@ -121,17 +153,17 @@ final class DoubleDoubleInverse implements ApproximateInverse {
 
   @Override
   public double[][] times(double[][] v) {
-    double[][] product = new double[2][size];
+    double[][] result = new double[2][size];
     for (int i = 0; i < size; i++) {
       DoubleDouble sum = DoubleDouble.of(0);
       for (int j = 0; j < size; j++) {
-        int at = i * size + j;
         sum =
-            sum.plus(new DoubleDouble(high[at], low[at]).times(new DoubleDouble(v[0][j], v[1][j])));
+            sum.plus(
+                new DoubleDouble(high[i][j], low[i][j]).times(new DoubleDouble(v[0][j], v[1][j])));
       }
-      product[0][i] = sum.high();
-      product[1][i] = sum.low();
+      result[0][i] = sum.high();
+      result[1][i] = sum.low();
     }
-    return product;
+    return result;
   }
 }

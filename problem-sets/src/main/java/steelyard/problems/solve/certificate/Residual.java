@@ -20,14 +20,11 @@ final class Residual {
 
   /** Takes into account that a vector was added to x̃. */
   static void subtract(ScaledSystem system, ExactAccumulator[] residual, double[] added) {
-    int n = system.size;
-    for (int i = 0; i < n; i++) {
-      for (int j = 0; j < n; j++) {
-        double entry = system.matrix[i * n + j];
-        if (entry != 0 && added[j] != 0) {
-          residual[i].addProduct(-entry, added[j]);
-        }
-      }
+    double[] negative = Arrays.stream(added).map(entry -> -entry).toArray();
+    double[] row = new double[system.size];
+    for (int i = 0; i < system.size; i++) {
+      System.arraycopy(system.matrix, i * system.size, row, 0, system.size);
+      residual[i].addProducts(row, negative);
     }
   }
 

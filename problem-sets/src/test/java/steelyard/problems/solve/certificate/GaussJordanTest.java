@@ -30,8 +30,21 @@ class GaussJordanTest {
     for (int n = 1; n <= 25; n += 3) {
       ScaledSystem system = new ScaledSystem(random(n), new double[n]);
       assertThat(worst(new DoubleInverse.DoubleRoute(), system)).isLessThan(1e-9);
-      assertThat(worst(new DoubleDoubleInverse.DoubleDoubleRoute(), system)).isLessThan(1e-25);
       assertThat(worst(new FixedPointInverse.FixedPointRoute(256), system)).isLessThan(1e-70);
+    }
+  }
+
+  @Test
+  void doubleDoubleInvertsWhatDoubleCannot() {
+    for (int n = 12; n <= 17; n++) {
+      double[][] hilbert = new double[n][n];
+      for (int i = 0; i < n; i++) {
+        int row = i;
+        Arrays.setAll(hilbert[i], j -> 1.0 / (row + j + 1));
+      }
+      ScaledSystem system = new ScaledSystem(hilbert, new double[n]);
+      assertThat(worst(new DoubleInverse.DoubleRoute(), system)).isGreaterThan(1);
+      assertThat(worst(new DoubleDoubleInverse.DoubleDoubleRoute(), system)).isLessThan(0x1p-12);
     }
   }
 

@@ -88,22 +88,21 @@ class MutatedCertificateTest {
     return Dyadic.of(bound).compareTo(exactRowSum(system, r[0], 0)) >= 0;
   }
 
-  // In the last entry of R A the products are 2^-54, many times 2^-108, -2^-54 and 1: the first is
-  // kept as the error of a sum, in which the small ones are lost before it cancels. The other
-  // entries of the last row are zero.
+  // In the last entry of R A - I the products are 2^-54, many times 2^-112, -2^-54 and 1: the first
+  // is kept as the error of a sum, in which the small ones are lost, a block at a time, before it
+  // cancels. The other entries of the last row are zero.
   private static boolean holdsTwofold(Allowances allowances) {
     int last = SIZE - 1;
     double[][] a = halfIdentity();
     double[][] r = twiceIdentity();
     for (int k = 0; k < last; k++) {
       a[k][last] = 0.25;
-      r[last][k] = k == 0 ? 0x1p-52 : k == last - 1 ? -0x1p-52 : 0x1p-106;
+      r[last][k] = k == 0 ? 0x1p-52 : k == last - 1 ? -0x1p-52 : 0x1p-110;
       a[last][k] = -r[last][k] / 4;
     }
     ScaledSystem system = new ScaledSystem(a, new double[SIZE]);
-    double[] high = Arrays.stream(r).flatMapToDouble(Arrays::stream).toArray();
     double bound =
-        new DoubleDoubleInverse(system, high, new double[high.length], allowances)
+        new DoubleDoubleInverse(system, r, new double[SIZE][SIZE], allowances)
             .residualRowSums()[last];
     return Dyadic.of(bound).compareTo(exactRowSum(system, r[last], last)) >= 0;
   }

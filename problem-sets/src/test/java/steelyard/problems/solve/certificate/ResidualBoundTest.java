@@ -35,14 +35,17 @@ class ResidualBoundTest {
     for (int trial = 0; trial < 200; trial++) {
       int n = 1 + random.nextInt(11);
       ScaledSystem system = randomSystem(n);
-      double[] high = system.matrix.clone();
-      double[] low = new double[n * n];
-      if (GaussJordan.invert(new DoubleDoubleRows(n, high, low))) {
-        disturb(trial % 2 == 0 ? high : low, trial);
+      double[][] high = system.rows();
+      double[][] low = new double[n][n];
+      if (GaussJordan.invert(new DoubleRows(high))) {
+        for (int at = 0; at < n * n; at++) {
+          low[at / n][at % n] = Math.ulp(high[at / n][at % n]) * (random.nextDouble() - 0.5);
+        }
+        disturb((trial % 2 == 0 ? high : low)[random.nextInt(n)], trial);
         requireBound(
             system,
             new DoubleDoubleInverse(system, high, low, Allowances.PROVEN),
-            at -> Dyadic.of(high[at]).add(Dyadic.of(low[at])),
+            at -> Dyadic.of(high[at / n][at % n]).add(Dyadic.of(low[at / n][at % n])),
             1e-28);
       }
     }
