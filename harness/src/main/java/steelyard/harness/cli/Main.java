@@ -5,6 +5,9 @@ import java.io.FileOutputStream;
 import java.io.OutputStreamWriter;
 import java.io.PrintWriter;
 import java.nio.charset.StandardCharsets;
+import java.util.LinkedHashMap;
+import java.util.Map;
+import java.util.function.Supplier;
 import picocli.CommandLine;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Option;
@@ -17,7 +20,6 @@ import picocli.CommandLine.ScopeType;
     mixinStandardHelpOptions = true,
     versionProvider = Version.class,
     synopsisSubcommandLabel = "COMMAND",
-    subcommands = {ListCommand.class, RunCommand.class, ChooseCommand.class, ProblemsCommand.class},
     footer = {
       "",
       "Exit codes: 0 done, 1 finding (a requirement that no candidate meets, a broken bound),",
@@ -26,6 +28,8 @@ import picocli.CommandLine.ScopeType;
       "Start with: steelyard run tour"
     })
 public final class Main implements Runnable {
+
+  private static final Map<String, Supplier<Object>> COMMANDS = commands();
 
   @CommandLine.Spec private CommandLine.Model.CommandSpec spec;
 
@@ -49,11 +53,28 @@ public final class Main implements Runnable {
 
   /** Runs a command and returns its exit code. */
   static int execute(PrintWriter out, PrintWriter err, String... args) {
-    return commandLine().setOut(out).setErr(err).execute(args);
+    return commandLine(args).setOut(out).setErr(err).execute(args);
   }
 
-  private static CommandLine commandLine() {
+  private static Map<String, Supplier<Object>> commands() {
+    Map<String, Supplier<Object>> commands = new LinkedHashMap<>();
+    commands.put("list", ListCommand::new);
+    commands.put("run", RunCommand::new);
+    commands.put("choose", ChooseCommand::new);
+    commands.put("problems", ProblemsCommand::new);
+    return commands;
+  }
+
+  // To read the annotations of a command takes as long as a bare JVM's start, so that a command
+  // that
+  // is named first is the only one that is read.
+  private static CommandLine commandLine(String... args) {
     CommandLine commandLine = new CommandLine(new Main());
+    if (args.length > 0 && COMMANDS.containsKey(args[0])) {
+      commandLine.addSubcommand(args[0], COMMANDS.get(args[0]).get());
+    } else {
+      COMMANDS.forEach((name, command) -> commandLine.addSubcommand(name, command.get()));
+    }
     commandLine.setParameterExceptionHandler(Failures::badUsage);
     commandLine.setExecutionExceptionHandler(Failures::failed);
     commandLine.setCaseInsensitiveEnumValuesAllowed(true);
