@@ -15,6 +15,8 @@ import java.util.regex.Pattern;
  * @param source where it was published, or which library it comes from
  * @param bound the a-priori error bound that it claims, if one is published
  * @param scope the problems that it is for
+ * @param precisionBits the bits of the significand in which it computes: 53 for binary64, 24 for
+ *     binary32; its unit roundoff is 2 to the power -precisionBits
  * @param dependsOnCores whether its answer legitimately depends on the number of processor cores
  */
 public record Candidate<K>(
@@ -25,7 +27,14 @@ public record Candidate<K>(
     String source,
     Optional<Bound> bound,
     Scope scope,
+    int precisionBits,
     boolean dependsOnCores) {
+
+  /** The precision of {@code double}. */
+  public static final int BINARY64 = 53;
+
+  /** The precision of {@code float}. */
+  public static final int BINARY32 = 24;
 
   private static final Pattern ID = Pattern.compile("[a-z0-9]+(-[a-z0-9]+)*");
 
@@ -51,22 +60,38 @@ public record Candidate<K>(
   public static <K> Candidate<K> of(
       String id, K kernel, String description, String cost, String source) {
     return new Candidate<>(
-        id, kernel, description, cost, source, Optional.empty(), Scope.EVERYTHING, false);
+        id, kernel, description, cost, source, Optional.empty(), Scope.EVERYTHING, BINARY64, false);
   }
 
   /** Returns this candidate with a claimed bound. */
   public Candidate<K> claiming(Bound claimed) {
     return new Candidate<>(
-        id, kernel, description, cost, source, Optional.of(claimed), scope, dependsOnCores);
+        id,
+        kernel,
+        description,
+        cost,
+        source,
+        Optional.of(claimed),
+        scope,
+        precisionBits,
+        dependsOnCores);
   }
 
   /** Returns this candidate restricted to some problems. */
   public Candidate<K> within(Scope narrower) {
-    return new Candidate<>(id, kernel, description, cost, source, bound, narrower, dependsOnCores);
+    return new Candidate<>(
+        id, kernel, description, cost, source, bound, narrower, precisionBits, dependsOnCores);
   }
 
   /** Returns this candidate marked as one whose answer depends on the number of cores. */
   public Candidate<K> dependingOnCores() {
-    return new Candidate<>(id, kernel, description, cost, source, bound, scope, true);
+    return new Candidate<>(
+        id, kernel, description, cost, source, bound, scope, precisionBits, true);
+  }
+
+  /** Returns this candidate marked as one that computes in another precision. */
+  public Candidate<K> inPrecision(int bits) {
+    return new Candidate<>(
+        id, kernel, description, cost, source, bound, scope, bits, dependsOnCores);
   }
 }

@@ -19,9 +19,6 @@ import steelyard.results.Status;
 /** Turns what candidates did with one problem into rows, with the problem's own judgement. */
 final class ProblemRows<K, D extends Data> {
 
-  private static final int PRECISION_BITS = 53;
-  private static final double UNIT_ROUNDOFF = 0x1p-53;
-
   /**
    * A claimed bound is evaluated in double arithmetic, a handful of operations; an observation
    * within this relative distance of it is not called a violation.
@@ -78,7 +75,7 @@ final class ProblemRows<K, D extends Data> {
         id.condition(),
         id.repeat(),
         id.seed(),
-        PRECISION_BITS,
+        candidate.precisionBits(),
         OptionalDouble.empty(),
         OptionalDouble.empty(),
         Optional.empty(),
@@ -116,7 +113,7 @@ final class ProblemRows<K, D extends Data> {
         id.condition(),
         id.repeat(),
         id.seed(),
-        PRECISION_BITS,
+        candidate.precisionBits(),
         OptionalDouble.of(condition.kappa()),
         condition.componentwise(),
         targetMet(id.condition(), condition.kappa()),
@@ -129,7 +126,9 @@ final class ProblemRows<K, D extends Data> {
         value(errors.map(Judgement::forwardError)),
         errors.map(Judgement::componentwiseBackwardError).orElse(OptionalDouble.empty()),
         errors.map(Judgement::componentwiseForwardError).orElse(OptionalDouble.empty()),
-        errors.map(j -> excess(j, condition)).orElse(OptionalDouble.empty()),
+        errors
+            .map(j -> excess(j, condition, unitRoundoff(candidate)))
+            .orElse(OptionalDouble.empty()),
         errors.map(j -> Rounding.valueOf(j.rounding().name())),
         errors.flatMap(j -> claim(candidate, j)),
         answer != null && answer.length == 1
@@ -154,8 +153,9 @@ final class ProblemRows<K, D extends Data> {
   }
 
   /** Where the condition number is infinite, no answer is worse than conditioning explains. */
-  private static OptionalDouble excess(Judgement judgement, Condition condition) {
-    double explained = Math.max(condition.kappa(), 1) * UNIT_ROUNDOFF;
+  private static OptionalDouble excess(
+      Judgement judgement, Condition condition, double unitRoundoff) {
+    double explained = Math.max(condition.kappa(), 1) * unitRoundoff;
     return Double.isInfinite(explained)
         ? OptionalDouble.empty()
         : OptionalDouble.of(judgement.forwardError() / explained);
@@ -165,10 +165,10 @@ final class ProblemRows<K, D extends Data> {
     return candidate
         .bound()
         .filter(bound -> problem.traits().containsAll(bound.traits()))
-        .flatMap(bound -> claim(bound, judgement));
+        .flatMap(bound -> claim(bound, judgement, unitRoundoff(candidate)));
   }
 
-  private Optional<Observation.Claim> claim(Bound bound, Judgement judgement) {
+  private Optional<Observation.Claim> claim(Bound bound, Judgement judgement, double unitRoundoff) {
     OptionalDouble observed =
         switch (bound.limits()) {
           case FORWARD_ERROR -> OptionalDouble.of(judgement.forwardError());
@@ -178,10 +178,14 @@ final class ProblemRows<K, D extends Data> {
     if (observed.isEmpty()) {
       return Optional.empty();
     }
-    double allowed = bound.formula().at(problem.size(), problem.condition().kappa(), UNIT_ROUNDOFF);
+    double allowed = bound.formula().at(problem.size(), problem.condition().kappa(), unitRoundoff);
     boolean held = observed.getAsDouble() <= allowed * (1 + EVALUATION_ALLOWANCE);
     return Optional.of(
         new Observation.Claim(bound.limits().name().toLowerCase(Locale.ROOT), allowed, held));
+  }
+
+  private static double unitRoundoff(Candidate<?> candidate) {
+    return Math.scalb(1.0, -candidate.precisionBits());
   }
 
   private static Status status(Judgement.Standing standing) {

@@ -1,6 +1,7 @@
 package steelyard.harness.task;
 
 import java.util.List;
+import java.util.function.Function;
 import org.openjdk.jmh.infra.Blackhole;
 import steelyard.algorithms.Candidate;
 import steelyard.algorithms.dot.DotProduct;
@@ -21,6 +22,16 @@ final class DotTask implements Task<DotProduct, Vectors> {
   @Override
   public String description() {
     return "the inner product of two vectors";
+  }
+
+  @Override
+  public Class<DotProduct> kernelType() {
+    return DotProduct.class;
+  }
+
+  @Override
+  public DotProduct kernel(Function<List<Data.Part>, double[]> answers) {
+    return (x, y) -> answers.apply(new Vectors(x, y).parts())[0];
   }
 
   @Override

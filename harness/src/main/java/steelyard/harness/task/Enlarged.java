@@ -1,6 +1,7 @@
 package steelyard.harness.task;
 
 import java.util.List;
+import java.util.function.Function;
 import java.util.stream.Stream;
 import org.openjdk.jmh.infra.Blackhole;
 import steelyard.algorithms.Candidate;
@@ -39,6 +40,16 @@ final class Enlarged<K, D extends Data> implements Task<K, D> {
   @Override
   public String description() {
     return task.description();
+  }
+
+  @Override
+  public Class<?> kernelType() {
+    return task.kernelType();
+  }
+
+  @Override
+  public K kernel(Function<List<Data.Part>, double[]> answers) {
+    return task.kernel(answers);
   }
 
   @Override

@@ -1,6 +1,7 @@
 package steelyard.harness.task;
 
 import java.util.List;
+import java.util.function.Function;
 import org.openjdk.jmh.infra.Blackhole;
 import steelyard.algorithms.Candidate;
 import steelyard.algorithms.solve.LinearSolver;
@@ -21,6 +22,16 @@ final class SolveTask implements Task<LinearSolver, LinearSystem> {
   @Override
   public String description() {
     return "the solution of a square system of linear equations";
+  }
+
+  @Override
+  public Class<LinearSolver> kernelType() {
+    return LinearSolver.class;
+  }
+
+  @Override
+  public LinearSolver kernel(Function<List<Data.Part>, double[]> answers) {
+    return (a, b) -> answers.apply(new LinearSystem(a, b).parts());
   }
 
   @Override

@@ -1,6 +1,7 @@
 package steelyard.harness.task;
 
 import java.util.List;
+import java.util.function.Function;
 import org.openjdk.jmh.infra.Blackhole;
 import steelyard.algorithms.Candidate;
 import steelyard.algorithms.sum.Summation;
@@ -21,6 +22,16 @@ final class SumTask implements Task<Summation, Terms> {
   @Override
   public String description() {
     return "the sum of the terms of an array";
+  }
+
+  @Override
+  public Class<Summation> kernelType() {
+    return Summation.class;
+  }
+
+  @Override
+  public Summation kernel(Function<List<Data.Part>, double[]> answers) {
+    return terms -> answers.apply(new Terms(terms).parts())[0];
   }
 
   @Override

@@ -1,6 +1,7 @@
 package steelyard.harness.task;
 
 import java.util.List;
+import java.util.function.Function;
 import org.openjdk.jmh.infra.Blackhole;
 import steelyard.algorithms.Candidate;
 import steelyard.problems.Data;
@@ -20,6 +21,17 @@ public interface Task<K, D extends Data> {
 
   /** Returns one line that says what is computed. */
   String description();
+
+  /** Returns the task's interface, which has one abstract method. */
+  Class<?> kernelType();
+
+  /**
+   * Returns a kernel that leaves the work to a function.
+   *
+   * @param answers takes the arrays of an input, named and ordered as {@link Data#parts()} has
+   *     them, and returns the answer as {@link #apply} does
+   */
+  K kernel(Function<List<Data.Part>, double[]> answers);
 
   /** Returns the candidates; the first is the textbook one, to which times are compared. */
   List<Candidate<K>> candidates();

@@ -3,6 +3,7 @@ package steelyard.harness.plan;
 import static org.assertj.core.api.Assertions.assertThat;
 
 import java.util.List;
+import java.util.function.Function;
 import org.apache.commons.rng.UniformRandomProvider;
 import org.junit.jupiter.api.Test;
 import org.openjdk.jmh.infra.Blackhole;
@@ -36,6 +37,16 @@ class CatalogueTest {
     @Override
     public String description() {
       return "a load";
+    }
+
+    @Override
+    public Class<?> kernelType() {
+      return Runnable.class;
+    }
+
+    @Override
+    public Runnable kernel(Function<List<Data.Part>, double[]> answers) {
+      return () -> answers.apply(List.of());
     }
 
     @Override

@@ -7,6 +7,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.OptionalDouble;
 import java.util.Set;
+import java.util.function.Function;
 import java.util.function.UnaryOperator;
 import org.apache.commons.rng.UniformRandomProvider;
 import org.openjdk.jmh.infra.Blackhole;
@@ -44,6 +45,16 @@ record ToyTask(List<Candidate<UnaryOperator<double[]>>> candidates)
   @Override
   public String description() {
     return "the input itself";
+  }
+
+  @Override
+  public Class<?> kernelType() {
+    return UnaryOperator.class;
+  }
+
+  @Override
+  public UnaryOperator<double[]> kernel(Function<List<Data.Part>, double[]> answers) {
+    return values -> answers.apply(new Input(values).parts());
   }
 
   @Override
