@@ -63,8 +63,13 @@ public record ProblemId(
     }
   }
 
+  /** Says whether a text can be the id of a task, a family or a candidate. */
+  public static boolean isName(String text) {
+    return NAME.matcher(text).matches();
+  }
+
   private static void requireName(String what, String name) {
-    if (!NAME.matcher(name).matches()) {
+    if (!isName(name)) {
       throw new IllegalArgumentException(
           "the "
               + what

@@ -14,6 +14,8 @@ public enum Status {
   MALFORMED,
   /** The candidate threw. */
   EXCEPTION,
+  /** The JVM or the program in which the candidate ran ended during the call. */
+  CRASHED,
   /** The candidate did not return in time. */
   TIMEOUT,
   /** The candidate changed its input. */

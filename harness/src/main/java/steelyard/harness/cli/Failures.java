@@ -4,6 +4,7 @@ import java.io.PrintWriter;
 import java.util.List;
 import picocli.CommandLine;
 import picocli.CommandLine.ParameterException;
+import steelyard.harness.bring.BringException;
 import steelyard.harness.export.ExportException;
 import steelyard.harness.plan.PlanException;
 import steelyard.problems.UncertifiedException;
@@ -19,6 +20,7 @@ final class Failures {
   private static final List<Class<? extends RuntimeException>> BAD_INPUT =
       List.of(
           BadInputException.class,
+          BringException.class,
           PlanException.class,
           ExportException.class,
           UnreachableException.class,

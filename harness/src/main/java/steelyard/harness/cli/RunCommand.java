@@ -12,8 +12,10 @@ import picocli.CommandLine;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Option;
 import picocli.CommandLine.Parameters;
+import steelyard.harness.bring.Bringing;
 import steelyard.harness.execution.Execution;
 import steelyard.harness.execution.PlanExecution;
+import steelyard.harness.plan.Addition;
 import steelyard.harness.plan.Catalogue;
 import steelyard.harness.plan.Plan;
 import steelyard.harness.plan.PlanReader;
@@ -65,6 +67,8 @@ final class RunCommand implements Callable<Integer> {
   @Option(names = "--overwrite", description = "Replace the run that is already in the folder.")
   private boolean overwrite;
 
+  @CommandLine.Mixin private BringOptions bring;
+
   RunCommand() {}
 
   @Override
@@ -77,11 +81,13 @@ final class RunCommand implements Callable<Integer> {
     PrintWriter err = spec.commandLine().getErr();
     Screen screen = Screen.ofProcess();
     Instant started = Instant.now();
-    try (InterruptWatch watch = new InterruptWatch()) {
+    try (Bringing bringing =
+            new Bringing(Tasks.all(), plan.additions(), bring.isolation(), workers);
+        InterruptWatch watch = new InterruptWatch()) {
       Execution execution =
           new PlanExecution(
-                  Tasks.all(),
-                  new JmhStopwatch(PATIENCE),
+                  bringing.tasks(),
+                  new JmhStopwatch(PATIENCE, plan.additions()),
                   workers,
                   new ProgressReport(err, screen.terminal(), System::currentTimeMillis),
                   watch.interruption())
@@ -121,7 +127,11 @@ final class RunCommand implements Callable<Integer> {
   }
 
   private Plan plan() {
-    Plan plan = new PlanReader(Catalogue.of(Tasks.all())).find(planName);
+    List<Addition> additions = bring.additions();
+    Plan plan =
+        new PlanReader(Catalogue.of(Tasks.all()).with(additions), Bringing::expanded)
+            .find(planName)
+            .with(additions);
     if (seed != null) {
       plan = plan.withSeed(seed);
     }

@@ -1,8 +1,11 @@
 package steelyard.harness.data;
 
 import java.io.BufferedOutputStream;
+import java.io.ByteArrayOutputStream;
 import java.io.DataOutputStream;
 import java.io.IOException;
+import java.io.OutputStream;
+import java.io.UncheckedIOException;
 import java.nio.BufferUnderflowException;
 import java.nio.ByteBuffer;
 import java.nio.charset.StandardCharsets;
@@ -33,15 +36,35 @@ public final class DataFile {
    * @throws IOException if it cannot be written
    */
   public static void write(Path file, List<Data.Part> parts) throws IOException {
-    try (DataOutputStream out =
-        new DataOutputStream(new BufferedOutputStream(Files.newOutputStream(file)))) {
-      out.writeInt(MAGIC);
-      out.writeInt(VERSION);
-      out.writeInt(parts.size());
-      for (Data.Part part : parts) {
-        write(out, part);
-      }
+    try (OutputStream out = new BufferedOutputStream(Files.newOutputStream(file))) {
+      write(out, parts);
     }
+  }
+
+  /**
+   * Returns what a file with an input would hold.
+   *
+   * @throws IllegalArgumentException if the rows of a matrix differ in length
+   */
+  public static byte[] bytes(List<Data.Part> parts) {
+    ByteArrayOutputStream out = new ByteArrayOutputStream();
+    try {
+      write(out, parts);
+    } catch (IOException impossible) {
+      throw new UncheckedIOException(impossible);
+    }
+    return out.toByteArray();
+  }
+
+  private static void write(OutputStream stream, List<Data.Part> parts) throws IOException {
+    DataOutputStream out = new DataOutputStream(stream);
+    out.writeInt(MAGIC);
+    out.writeInt(VERSION);
+    out.writeInt(parts.size());
+    for (Data.Part part : parts) {
+      write(out, part);
+    }
+    out.flush();
   }
 
   /**
@@ -50,10 +73,20 @@ public final class DataFile {
    * @throws IOException if it cannot be read, or is not whole, or not such a file
    */
   public static List<Data.Part> read(Path file) throws IOException {
-    ByteBuffer in = ByteBuffer.wrap(Files.readAllBytes(file));
+    return parse(file.toString(), Files.readAllBytes(file));
+  }
+
+  /**
+   * Reads an input from the bytes of a file.
+   *
+   * @param name what to call it in messages
+   * @throws IOException if it is not whole, or no such file
+   */
+  public static List<Data.Part> parse(String name, byte[] bytes) throws IOException {
+    ByteBuffer in = ByteBuffer.wrap(bytes);
     try {
       if (in.getInt() != MAGIC || in.getInt() != VERSION) {
-        throw new IOException(file + " is not a data file of version " + VERSION);
+        throw new IOException(name + " is not a data file of version " + VERSION);
       }
       int count = in.getInt();
       List<Data.Part> parts = new ArrayList<>();
@@ -61,11 +94,11 @@ public final class DataFile {
         parts.add(part(in));
       }
       if (in.hasRemaining()) {
-        throw new IOException(file + " goes on after its last part, at byte " + in.position());
+        throw new IOException(name + " goes on after its last part, at byte " + in.position());
       }
       return List.copyOf(parts);
     } catch (BufferUnderflowException e) {
-      throw new IOException(file + " ends before its last part does", e);
+      throw new IOException(name + " ends before its last part does", e);
     }
   }
 

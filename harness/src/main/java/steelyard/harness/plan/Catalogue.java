@@ -1,5 +1,6 @@
 package steelyard.harness.plan;
 
+import java.util.ArrayList;
 import java.util.List;
 import steelyard.algorithms.Candidate;
 import steelyard.harness.task.Task;
@@ -32,6 +33,25 @@ public record Catalogue(List<TaskEntry> tasks) {
     public TaskEntry {
       families = List.copyOf(families);
       candidates = List.copyOf(candidates);
+    }
+
+    TaskEntry with(List<Addition> additions) {
+      List<String> all = new ArrayList<>(candidates);
+      for (Addition addition : additions) {
+        if (!addition.task().equals(id)) {
+          continue;
+        }
+        if (all.contains(addition.id())) {
+          throw new PlanException(
+              "task '"
+                  + id
+                  + "' has a candidate '"
+                  + addition.id()
+                  + "' already: choose another id");
+        }
+        all.add(addition.id());
+      }
+      return new TaskEntry(id, families, all);
     }
 
     List<String> familyIds() {
@@ -68,6 +88,15 @@ public record Catalogue(List<TaskEntry> tasks) {
   /** Returns the catalogue of these tasks. */
   public static Catalogue of(List<? extends Task<?, ?>> tasks) {
     return new Catalogue(tasks.stream().map(Catalogue::entry).toList());
+  }
+
+  /**
+   * Returns this catalogue with more candidates; those of other tasks are passed over.
+   *
+   * @throws PlanException if a task has two of the same id
+   */
+  public Catalogue with(List<Addition> additions) {
+    return new Catalogue(tasks.stream().map(task -> task.with(additions)).toList());
   }
 
   List<String> taskIds() {

@@ -1,5 +1,6 @@
 package steelyard.harness.plan;
 
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import steelyard.results.text.NearestName;
@@ -9,6 +10,7 @@ import steelyard.results.text.NearestName;
  *
  * @param name what it is called
  * @param seed from which all randomness comes
+ * @param additions the candidates that it brings along
  * @param timing how long candidates are timed; empty: no timing
  * @param weighings what is weighed
  * @param requirements what a candidate must meet
@@ -16,12 +18,14 @@ import steelyard.results.text.NearestName;
 public record Plan(
     String name,
     long seed,
+    List<Addition> additions,
     Optional<TimingEffort> timing,
     List<Weighing> weighings,
     List<Requirement> requirements) {
 
   /** Copies the lists. */
   public Plan {
+    additions = List.copyOf(additions);
     weighings = List.copyOf(weighings);
     requirements = List.copyOf(requirements);
   }
@@ -41,12 +45,25 @@ public record Plan(
 
   /** Returns this plan with another seed. */
   public Plan withSeed(long other) {
-    return new Plan(name, other, timing, weighings, requirements);
+    return new Plan(name, other, additions, timing, weighings, requirements);
   }
 
   /** Returns this plan without timing. */
   public Plan withoutTiming() {
-    return new Plan(name, seed, Optional.empty(), weighings, requirements);
+    return new Plan(name, seed, additions, Optional.empty(), weighings, requirements);
+  }
+
+  /** Returns this plan with more candidates, which take part wherever their task is weighed. */
+  public Plan with(List<Addition> more) {
+    List<Addition> all = new ArrayList<>(additions);
+    all.addAll(more);
+    return new Plan(
+        name,
+        seed,
+        all,
+        timing,
+        weighings.stream().map(weighing -> weighing.with(more)).toList(),
+        requirements);
   }
 
   /**
@@ -64,6 +81,7 @@ public record Plan(
     return new Plan(
         name,
         seed,
+        additions.stream().filter(a -> a.task().equals(task)).toList(),
         timing,
         weighings.stream().filter(w -> w.task().equals(task)).toList(),
         requirements.stream().filter(r -> r.task().equals(task)).toList());

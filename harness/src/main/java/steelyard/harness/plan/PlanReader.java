@@ -11,6 +11,7 @@ import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.function.UnaryOperator;
 import steelyard.results.text.NearestName;
 
 /** Reads plans, fills in what they leave to a default, and holds them against a catalogue. */
@@ -27,10 +28,21 @@ public final class PlanReader {
   private static final int MIN_MEASUREMENTS = 3;
 
   private final Catalogue catalogue;
+  private final UnaryOperator<List<Addition>> expansion;
 
   /** Makes a reader of plans about these tasks. */
   public PlanReader(Catalogue catalogue) {
+    this(catalogue, UnaryOperator.identity());
+  }
+
+  /**
+   * Makes a reader of plans about these tasks.
+   *
+   * @param expansion replaces an addition that stands for several by those
+   */
+  public PlanReader(Catalogue catalogue, UnaryOperator<List<Addition>> expansion) {
     this.catalogue = catalogue;
+    this.expansion = expansion;
   }
 
   /**
@@ -76,8 +88,10 @@ public final class PlanReader {
   public Plan read(String name, String text) {
     PlanSource source = new PlanSource(name, new KeyLocator(text));
     PlanTable root = new PlanTable(source, parsed(source, text), "", 0);
-    root.allowOnly(List.of("name", "seed", "timing", "weigh", "require"));
-    WeighingReader weighingReader = new WeighingReader(catalogue);
+    root.allowOnly(List.of("name", "seed", "timing", "add", "weigh", "require"));
+    AdditionReader additionReader = new AdditionReader(catalogue, name, expansion);
+    List<Addition> additions = additionReader.read(root.entries("add"));
+    WeighingReader weighingReader = new WeighingReader(catalogue.with(additions));
     List<Weighing> weighings = root.entries("weigh").stream().map(weighingReader::read).toList();
     if (weighings.isEmpty()) {
       throw root.fail("weigh", "the plan weighs nothing: it needs at least one [[weigh]] entry");
@@ -90,6 +104,7 @@ public final class PlanReader {
     return new Plan(
         root.has("name") ? root.text("name") : nameOf(name),
         root.anyLong("seed", DEFAULT_SEED),
+        additions,
         root.section("timing").map(section -> timing(section, weighings)),
         weighings,
         requirements(root, weighings));

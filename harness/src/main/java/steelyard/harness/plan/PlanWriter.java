@@ -21,6 +21,7 @@ final class PlanWriter {
     line("name", quoted(plan.name()));
     line("seed", plan.seed());
     plan.timing().ifPresent(this::timing);
+    plan.additions().forEach(this::addition);
     plan.weighings().forEach(this::weighing);
     plan.requirements().forEach(this::requirement);
     return out.toString();
@@ -34,6 +35,16 @@ final class PlanWriter {
     line("iteration_ms", effort.iterationMs());
     if (!effort.sizes().isEmpty()) {
       line("sizes", list(effort.sizes(), String::valueOf));
+    }
+  }
+
+  private void addition(Addition addition) {
+    out.append("\n[[add]]\n");
+    line("task", quoted(addition.task()));
+    line("id", quoted(addition.id()));
+    line("use", quoted(addition.use()));
+    if (!addition.jars().isEmpty()) {
+      line("jars", list(addition.jars(), PlanWriter::quoted));
     }
   }
 

@@ -28,6 +28,13 @@ public record Weighing(
     candidates = List.copyOf(candidates);
   }
 
+  /** Returns this weighing with those of more candidates that are of its task. */
+  Weighing with(List<Addition> more) {
+    List<String> ids =
+        more.stream().filter(each -> each.task().equals(task)).map(Addition::id).toList();
+    return new Weighing(task, families, PlanCells.union(candidates, ids), repeats, time, timeoutMs);
+  }
+
   /** Returns the share of a family that takes part. */
   FamilyShare share(String family) {
     return families.stream().filter(s -> s.family().equals(family)).findFirst().orElseThrow();

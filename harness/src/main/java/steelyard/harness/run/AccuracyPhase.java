@@ -16,6 +16,7 @@ import steelyard.results.Observation;
 public final class AccuracyPhase {
 
   private static final long WATCH_MILLIS = 20;
+  private static final long LAST_BREATH_MILLIS = 100;
   private static final String NAME = "accuracy";
 
   private final int threads;
@@ -59,7 +60,7 @@ public final class AccuracyPhase {
     private final List<Worker> workers = new ArrayList<>();
     private final AtomicReference<Throwable> fault = new AtomicReference<>();
     private int finished;
-    private int strayCalls;
+    private final List<Thread> abandoned = new ArrayList<>();
     private int active;
 
     Crew(List<Assignment<?, ?>> assignments) {
@@ -84,7 +85,21 @@ public final class AccuracyPhase {
       all.stream()
           .filter(trials -> trials.rows().size() == trials.assignment().candidates().size())
           .forEach(trials -> rows.addAll(trials.rows()));
-      return new Outcome(List.copyOf(rows), finished == all.size(), strayCalls);
+      return new Outcome(List.copyOf(rows), finished == all.size(), strayCalls());
+    }
+
+    // A call into another JVM ends when its thread is interrupted; any other goes on.
+    private int strayCalls() {
+      int count = 0;
+      for (Thread thread : abandoned) {
+        try {
+          thread.join(LAST_BREATH_MILLIS);
+        } catch (InterruptedException interrupted) {
+          interruption.request();
+        }
+        count += thread.isAlive() ? 1 : 0;
+      }
+      return count;
     }
 
     private void rethrowFault() {
@@ -111,7 +126,7 @@ public final class AccuracyPhase {
         if (worker.guard.abandonIfOverdue()) {
           each.remove();
           active--;
-          strayCalls++;
+          abandoned.add(worker.thread);
           worker.thread.interrupt();
           orphans.add(worker.trials);
         }

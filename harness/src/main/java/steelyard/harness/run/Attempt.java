@@ -14,7 +14,7 @@ import steelyard.results.Status;
  * @param detail what went wrong, in a few words; empty where nothing did
  * @param answer the answer, if there is one
  */
-record Attempt(Status status, String detail, double[] answer) {
+public record Attempt(Status status, String detail, double[] answer) {
 
   /**
    * Calls a candidate twice, each time on a copy of its own, and lets nothing that it throws
@@ -35,6 +35,8 @@ record Attempt(Status status, String detail, double[] answer) {
             Status.NONDETERMINISTIC, "two calls on the same input gave different answers", null);
       }
       return new Attempt(Status.OK, "", first);
+    } catch (Mishap elsewhere) {
+      return new Attempt(elsewhere.status(), elsewhere.getMessage(), null);
     } catch (Throwable thrown) {
       return new Attempt(Status.EXCEPTION, describe(thrown), null);
     }
@@ -57,7 +59,10 @@ record Attempt(Status status, String detail, double[] answer) {
     return Arrays.equals(left, right);
   }
 
-  private static String describe(Throwable thrown) {
+  /**
+   * Returns what a table says of something that was thrown, whatever that does when it is asked.
+   */
+  public static String describe(Throwable thrown) {
     String message;
     try {
       message = thrown.getMessage();

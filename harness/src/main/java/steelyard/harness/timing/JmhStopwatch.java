@@ -7,6 +7,7 @@ import java.nio.file.Path;
 import java.time.Duration;
 import java.util.Collection;
 import java.util.List;
+import java.util.Optional;
 import java.util.OptionalDouble;
 import org.openjdk.jmh.profile.GCProfiler;
 import org.openjdk.jmh.results.Result;
@@ -20,6 +21,7 @@ import org.openjdk.jmh.runner.options.OptionsBuilder;
 import org.openjdk.jmh.runner.options.TimeValue;
 import org.openjdk.jmh.runner.options.VerboseMode;
 import org.openjdk.jmh.util.Statistics;
+import steelyard.harness.plan.Addition;
 import steelyard.harness.plan.TimingEffort;
 
 /** Measures with JMH in forked JVMs, and reads its result objects. */
@@ -39,14 +41,17 @@ public final class JmhStopwatch implements Stopwatch {
   private static final String ALLOCATION = "gc.alloc.rate.norm";
 
   private final Duration patience;
+  private final List<Addition> additions;
 
   /**
    * Makes a stopwatch.
    *
    * @param patience how long it waits for another timing run on this machine
+   * @param additions the candidates from outside
    */
-  public JmhStopwatch(Duration patience) {
+  public JmhStopwatch(Duration patience, List<Addition> additions) {
     this.patience = patience;
+    this.additions = List.copyOf(additions);
   }
 
   /** Returns the flags of the JVMs in which it measures, for who wants to compare with it. */
@@ -108,7 +113,11 @@ public final class JmhStopwatch implements Stopwatch {
     return OutputFormatFactory.createFormatInstance(sink, VerboseMode.SILENT);
   }
 
-  private static Options options(String task, String candidate, Path data, TimingEffort effort) {
+  private Options options(String task, String candidate, Path data, TimingEffort effort) {
+    Optional<Addition> added =
+        additions.stream()
+            .filter(each -> each.task().equals(task) && each.id().equals(candidate))
+            .findFirst();
     TimeValue iteration = TimeValue.milliseconds(effort.iterationMs());
     return new OptionsBuilder()
         .jvmArgs(FORK_FLAGS.toArray(String[]::new))
@@ -116,6 +125,8 @@ public final class JmhStopwatch implements Stopwatch {
         .param("task", task)
         .param("candidate", candidate)
         .param("data", data.toString())
+        .param("use", added.map(Addition::use).orElse(""))
+        .param("jars", added.map(each -> String.join("\n", each.jars())).orElse(""))
         .forks(effort.forks())
         .warmupIterations(effort.warmup())
         .warmupTime(iteration)

@@ -62,7 +62,9 @@ final class StopwatchOverhead {
 
   private static double throughStopwatch(Path data, TimingEffort effort) {
     try {
-      return new JmhStopwatch(Duration.ofMinutes(1)).measure("sum", "recursive", data, effort).ns();
+      return new JmhStopwatch(Duration.ofMinutes(1), List.of())
+          .measure("sum", "recursive", data, effort)
+          .ns();
     } catch (TimingException failed) {
       throw new IllegalStateException(failed);
     }

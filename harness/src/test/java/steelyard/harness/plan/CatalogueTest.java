@@ -46,7 +46,7 @@ class CatalogueTest {
 
     @Override
     public Runnable kernel(Function<List<Data.Part>, double[]> answers) {
-      return () -> answers.apply(List.of());
+      return () -> {};
     }
 
     @Override

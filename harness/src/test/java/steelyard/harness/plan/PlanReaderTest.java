@@ -48,6 +48,7 @@ class PlanReaderTest {
             new Plan(
                 "harvest",
                 -7,
+                List.of(),
                 Optional.of(new TimingEffort(2, 0, 4, 20, List.of(64, 32))),
                 List.of(
                     new Weighing(
@@ -72,6 +73,7 @@ class PlanReaderTest {
             new Plan(
                 "harvest",
                 PlanReader.DEFAULT_SEED,
+                List.of(),
                 Optional.of(new TimingEffort(1, 3, 5, 100, List.of())),
                 List.of(
                     new Weighing(

@@ -83,6 +83,9 @@ class PlanRoundTripTest {
         new Plan(
             "p",
             Long.MIN_VALUE,
+            List.of(
+                new Addition("sum", "mine", "com.acme.Totals#net(double[])", List.of("/a b.jar")),
+                new Addition("solve", "bare", "com.acme.Solver", List.of())),
             Optional.of(new TimingEffort(3, 0, 1, 1, List.of(7, 5))),
             List.of(
                 new Weighing(

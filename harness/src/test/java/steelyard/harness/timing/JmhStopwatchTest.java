@@ -32,12 +32,14 @@ final class JmhStopwatchTest {
 
   @Test
   void aFigureComesWithItsIntervalAndAllocation() throws TimingException {
-    Score lean = new JmhStopwatch(Duration.ZERO).measure("sum", "recursive", input, SHORTEST);
+    Score lean =
+        new JmhStopwatch(Duration.ZERO, List.of()).measure("sum", "recursive", input, SHORTEST);
     assertThat(lean.ns()).isPositive();
     assertThat(lean.lowNs()).isBetween(0.0, lean.ns());
     assertThat(lean.highNs()).isGreaterThanOrEqualTo(lean.ns());
 
-    Score wasteful = new JmhStopwatch(Duration.ZERO).measure("sum", "big-decimal", input, SHORTEST);
+    Score wasteful =
+        new JmhStopwatch(Duration.ZERO, List.of()).measure("sum", "big-decimal", input, SHORTEST);
     assertThat(wasteful.allocatedBytes().orElseThrow()).isGreaterThan(1000);
   }
 
@@ -45,7 +47,9 @@ final class JmhStopwatchTest {
   void aForkThatFailsIsOneSentence() {
     Path missing = directory.resolve("missing.bin");
     assertThatThrownBy(
-            () -> new JmhStopwatch(Duration.ZERO).measure("sum", "recursive", missing, SHORTEST))
+            () ->
+                new JmhStopwatch(Duration.ZERO, List.of())
+                    .measure("sum", "recursive", missing, SHORTEST))
         .isInstanceOf(TimingException.class)
         .hasMessageStartingWith("the timed program failed");
   }
