@@ -5,6 +5,7 @@ import java.util.List;
 import picocli.CommandLine;
 import picocli.CommandLine.ParameterException;
 import steelyard.harness.export.ExportException;
+import steelyard.harness.input.InputException;
 import steelyard.harness.plan.PlanException;
 import steelyard.problems.UncertifiedException;
 import steelyard.problems.UnreachableException;
@@ -21,6 +22,7 @@ final class Failures {
           BadInputException.class,
           PlanException.class,
           ExportException.class,
+          InputException.class,
           UnreachableException.class,
           UncertifiedException.class,
           RequirementException.class,
