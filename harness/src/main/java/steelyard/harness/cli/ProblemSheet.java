@@ -46,7 +46,7 @@ final class ProblemSheet {
         "size n: " + problem.size() + "; digest of the data: " + DataDigest.of(problem.data()));
     say(lines, "condition number \u03BA: " + condition());
     say(lines, "exact answer for the stored doubles: " + answerText());
-    say(lines, exactness());
+    say(lines, inexact.words());
     lines.add("");
     lines.add("How accurate can any algorithm be here?");
     say(lines, best());
@@ -72,17 +72,6 @@ final class ProblemSheet {
             .map(entry -> DoubleText.scientific(entry, DIGITS))
             .collect(Collectors.joining(", "));
     return answer.size() > MOST_ENTRIES ? entries + ", ... " + answer.size() + " entries" : entries;
-  }
-
-  private String exactness() {
-    if (inexact.count() == 0) {
-      return "all " + inexact.values() + " values of the file are doubles, none was rounded";
-    }
-    return inexact.count()
-        + " of "
-        + inexact.values()
-        + " values are no doubles and were rounded to the nearest; the first is "
-        + inexact.first().orElseThrow();
   }
 
   private String best() {

@@ -15,8 +15,10 @@ import picocli.CommandLine.Parameters;
 import steelyard.harness.execution.Execution;
 import steelyard.harness.execution.PlanExecution;
 import steelyard.harness.plan.Catalogue;
+import steelyard.harness.plan.OwnFiles;
 import steelyard.harness.plan.Plan;
 import steelyard.harness.plan.PlanReader;
+import steelyard.harness.task.Task;
 import steelyard.harness.task.Tasks;
 import steelyard.harness.timing.JmhStopwatch;
 import steelyard.results.run.Run;
@@ -76,6 +78,11 @@ final class RunCommand implements Callable<Integer> {
     RunFolder.prepare(folder, existing);
     PrintWriter err = spec.commandLine().getErr();
     Screen screen = Screen.ofProcess();
+    for (Task<?, ?> task : Tasks.all()) {
+      for (OwnFiles own : plan.files(task.id())) {
+        err.println(own.source().words() + ": " + own.inexact().words());
+      }
+    }
     Instant started = Instant.now();
     try (InterruptWatch watch = new InterruptWatch()) {
       Execution execution =

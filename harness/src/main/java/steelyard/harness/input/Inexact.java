@@ -16,6 +16,19 @@ public record Inexact(long values, long count, long belowNormal, Optional<String
   /** Nothing was read. */
   public static final Inexact NONE = new Inexact(0, 0, 0, Optional.empty());
 
+  /** Returns a sentence without its end that says how many values were rounded. */
+  public String words() {
+    return first
+        .map(
+            example ->
+                count
+                    + " of "
+                    + values
+                    + " values are no doubles and were rounded to the nearest; the first is "
+                    + example)
+        .orElse("all " + values + " values are doubles, none was rounded");
+  }
+
   /** Returns the counts of both. */
   public Inexact and(Inexact other) {
     return new Inexact(

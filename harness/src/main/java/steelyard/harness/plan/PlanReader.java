@@ -11,6 +11,8 @@ import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import steelyard.harness.task.Task;
+import steelyard.harness.task.Tasks;
 import steelyard.results.text.NearestName;
 
 /** Reads plans, fills in what they leave to a default, and holds them against a catalogue. */
@@ -27,10 +29,12 @@ public final class PlanReader {
   private static final int MIN_MEASUREMENTS = 3;
 
   private final Catalogue catalogue;
+  private final List<? extends Task<?, ?>> tasks;
 
-  /** Makes a reader of plans about these tasks. */
+  /** Makes a reader of plans about these tasks, whose files are read for the tasks of the house. */
   public PlanReader(Catalogue catalogue) {
     this.catalogue = catalogue;
+    this.tasks = Tasks.all();
   }
 
   /**
@@ -77,7 +81,8 @@ public final class PlanReader {
     PlanSource source = new PlanSource(name, new KeyLocator(text));
     PlanTable root = new PlanTable(source, parsed(source, text), "", 0);
     root.allowOnly(List.of("name", "seed", "timing", "weigh", "require"));
-    WeighingReader weighingReader = new WeighingReader(catalogue);
+    WeighingReader weighingReader =
+        new WeighingReader(catalogue, new FileShareReader(tasks, folderOf(name)));
     List<Weighing> weighings = root.entries("weigh").stream().map(weighingReader::read).toList();
     if (weighings.isEmpty()) {
       throw root.fail("weigh", "the plan weighs nothing: it needs at least one [[weigh]] entry");
@@ -113,7 +118,10 @@ public final class PlanReader {
               + effort.forks() * effort.measurement());
     }
     for (Weighing weighing : weighings) {
-      weighing.time().ifPresent(family -> checkReach(table, effort, weighing.task(), family));
+      weighing
+          .time()
+          .filter(family -> weighing.share(family).generated())
+          .ifPresent(family -> checkReach(table, effort, weighing.task(), family));
     }
     return effort;
   }
@@ -190,6 +198,12 @@ public final class PlanReader {
             + "'; "
             + NearestName.hint(name, BuiltInPlans.names()),
         cause);
+  }
+
+  /** Files in a plan are named from where the plan stands. */
+  private static Path folderOf(String name) {
+    Path folder = Path.of(name).toAbsolutePath().getParent();
+    return folder == null ? Path.of("").toAbsolutePath() : folder;
   }
 
   private static String nameOf(String file) {

@@ -62,8 +62,35 @@ final class WeighIT {
             .withJvmOptions("-Djmh.ignoreLock=true")
             .run("weigh", "few.txt", "--task", "sum", "--candidates", "recursive,exact");
     assertThat(result.exitCode()).as(result.err()).isZero();
-    assertThat(result.out()).contains("ns per call", "all 8 values of the file are doubles");
+    assertThat(result.out()).contains(" per call", "all 8 values are doubles");
     assertThat(result.out()).containsPattern("DECISION: (recursive|exact) is the fastest");
+  }
+
+  @Test
+  void aPlanTakesFilesBesideFamiliesAndRunsAgainFromItsRunFolder() throws IOException {
+    Files.createDirectory(directory.resolve("plans"));
+    Files.writeString(directory.resolve("plans/few.csv"), "t,kg\na,0.1\nb,1e9\nc,-1e9\n");
+    Files.writeString(
+        directory.resolve("plans/own.toml"),
+        """
+        [[weigh]]
+        task = "sum"
+        families = ["same-sign"]
+        files = ["few.csv"]
+        columns = ["kg"]
+        sizes = [10]
+        candidates = ["recursive", "exact"]
+        """);
+    Program program = Program.in(directory);
+    Program.Result result = program.run("run", "plans/own.toml", "--no-timing", "--out", "one");
+    assertThat(result.exitCode()).as(result.err()).isZero();
+    assertThat(result.err()).contains("few.csv, column kg: 1 of 3 values are no doubles");
+    assertThat(Files.readString(directory.resolve("one/errors.csv")))
+        .contains("sum/file-few-kg/n3/r1", "sum/same-sign/n10/r3");
+    Program.Result again = program.run("run", "one/plan.toml", "--out", "two");
+    assertThat(again.exitCode()).as(again.err()).isZero();
+    assertThat(directory.resolve("two/errors.csv"))
+        .hasSameBinaryContentAs(directory.resolve("one/errors.csv"));
   }
 
   @ParameterizedTest
