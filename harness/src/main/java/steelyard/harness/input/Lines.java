@@ -3,6 +3,7 @@ package steelyard.harness.input;
 import java.io.BufferedInputStream;
 import java.io.BufferedReader;
 import java.io.EOFException;
+import java.io.FileInputStream;
 import java.io.IOException;
 import java.io.InputStream;
 import java.io.InputStreamReader;
@@ -10,9 +11,7 @@ import java.io.Reader;
 import java.nio.charset.CharacterCodingException;
 import java.nio.charset.CodingErrorAction;
 import java.nio.charset.StandardCharsets;
-import java.nio.file.AccessDeniedException;
 import java.nio.file.Files;
-import java.nio.file.NoSuchFileException;
 import java.nio.file.Path;
 import java.util.zip.GZIPInputStream;
 import java.util.zip.ZipException;
@@ -50,7 +49,7 @@ final class Lines implements AutoCloseable {
   }
 
   /**
-   * Opens a file.
+   * Opens a file, or a pipe: a channel would want to seek in it.
    *
    * @throws InputException if it is none that can be read
    */
@@ -58,9 +57,15 @@ final class Lines implements AutoCloseable {
     if (Files.isDirectory(file)) {
       throw new InputException(file + " is a directory, where a file with data is wanted");
     }
+    if (!Files.exists(file)) {
+      throw new InputException("there is no file " + file);
+    }
+    if (!Files.isReadable(file)) {
+      throw new InputException(file + " may not be read; its owner must allow it");
+    }
     InputStream in = null;
     try {
-      in = new BufferedInputStream(Files.newInputStream(file));
+      in = new BufferedInputStream(new FileInputStream(file.toFile()));
       Reader reader =
           new InputStreamReader(
               unpacked(in),
@@ -133,11 +138,7 @@ final class Lines implements AutoCloseable {
 
   private static InputException unreadable(String file, int line, IOException cause) {
     String sentence;
-    if (cause instanceof NoSuchFileException) {
-      sentence = "there is no file " + file;
-    } else if (cause instanceof AccessDeniedException) {
-      sentence = file + " may not be read; its owner must allow it";
-    } else if (cause instanceof CharacterCodingException) {
+    if (cause instanceof CharacterCodingException) {
       sentence = file + ":" + line + ": near this line the file is not UTF-8, as it must be";
     } else if (cause instanceof ZipException || cause instanceof EOFException) {
       sentence = file + " is no whole gzip file: it is damaged or cut off after line " + line;

@@ -16,6 +16,8 @@ import steelyard.problems.Reach;
  */
 public final class OwnFamily<D extends Data> implements Family<D> {
 
+  private static final int MEBIBYTE_BITS = 20;
+
   private final Task<?, D> task;
   private final DataFiles source;
   private final D data;
@@ -42,8 +44,12 @@ public final class OwnFamily<D extends Data> implements Family<D> {
    */
   public static <D extends Data> OwnFamily<D> read(Task<?, D> task, DataFiles source) {
     PartsReader reader = new PartsReader(task, source);
-    List<Data.Part> parts = reader.read();
-    return new OwnFamily<>(task, source, parts, reader.inexact());
+    try {
+      List<Data.Part> parts = reader.read();
+      return new OwnFamily<>(task, source, parts, reader.inexact());
+    } catch (OutOfMemoryError tooLarge) {
+      throw tooLarge(source, tooLarge);
+    }
   }
 
   /** Returns how many values of the files were rounded. */
@@ -68,9 +74,21 @@ public final class OwnFamily<D extends Data> implements Family<D> {
         problem = task.problem(data);
       } catch (IllegalArgumentException unfit) {
         throw new InputException(source.words() + ": " + unfit.getMessage(), unfit);
+      } catch (OutOfMemoryError tooLarge) {
+        throw tooLarge(source, tooLarge);
       }
     }
     return problem;
+  }
+
+  /** An array that did not fit leaves the memory as it was, so that this can still be said. */
+  private static InputException tooLarge(DataFiles source, OutOfMemoryError cause) {
+    return new InputException(
+        source.words()
+            + " does not fit in the "
+            + (Runtime.getRuntime().maxMemory() >> MEBIBYTE_BITS)
+            + " MiB that this JVM may use; allow more, such as by JAVA_TOOL_OPTIONS=-Xmx2g",
+        cause);
   }
 
   @Override

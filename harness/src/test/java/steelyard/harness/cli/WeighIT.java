@@ -67,6 +67,18 @@ final class WeighIT {
   }
 
   @Test
+  void whatDoesNotFitInMemoryIsOneSentence() throws IOException {
+    Files.writeString(directory.resolve("many.txt"), "1 2 3 4 5 6 7 8\n".repeat(300_000));
+    Program.Result result =
+        Program.in(directory)
+            .withJvmOptions("-Xmx24m")
+            .run("weigh", "many.txt", "--task", "sum", "--no-timing");
+    assertThat(result.exitCode()).as(result.err()).isEqualTo(2);
+    assertThat(result.err().lines().toList()).hasSize(1);
+    assertThat(result.err()).contains("many.txt does not fit in the ", "-Xmx2g");
+  }
+
+  @Test
   void aPlanTakesFilesBesideFamiliesAndRunsAgainFromItsRunFolder() throws IOException {
     Files.createDirectory(directory.resolve("plans"));
     Files.writeString(directory.resolve("plans/few.csv"), "t,kg\na,0.1\nb,1e9\nc,-1e9\n");
