@@ -6,6 +6,7 @@ import picocli.CommandLine;
 import picocli.CommandLine.ParameterException;
 import steelyard.harness.bring.BringException;
 import steelyard.harness.export.ExportException;
+import steelyard.harness.input.InputException;
 import steelyard.harness.plan.PlanException;
 import steelyard.problems.UncertifiedException;
 import steelyard.problems.UnreachableException;
@@ -23,6 +24,7 @@ final class Failures {
           BringException.class,
           PlanException.class,
           ExportException.class,
+          InputException.class,
           UnreachableException.class,
           UncertifiedException.class,
           RequirementException.class,

@@ -60,6 +60,7 @@ public final class Main implements Runnable {
     Map<String, Supplier<Object>> commands = new LinkedHashMap<>();
     commands.put("list", ListCommand::new);
     commands.put("run", RunCommand::new);
+    commands.put("weigh", WeighCommand::new);
     commands.put("choose", ChooseCommand::new);
     commands.put("problems", ProblemsCommand::new);
     return commands;

@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.List;
 import steelyard.harness.plan.Plan;
 import steelyard.harness.plan.Requirement;
+import steelyard.results.Observation;
 import steelyard.results.choice.Choice;
 import steelyard.results.choice.Chooser;
 import steelyard.results.run.Run;
@@ -16,17 +17,7 @@ import steelyard.results.verdict.BrokenBound;
 record PlanFindings(List<String> lines) {
 
   static PlanFindings of(Plan plan, Run run) {
-    List<String> lines = new ArrayList<>();
-    for (BrokenBound broken : BrokenBound.in(run.observations())) {
-      lines.add(
-          "finding: bound broken by "
-              + broken.candidate()
-              + " on "
-              + broken.problem()
-              + ": "
-              + broken.limits()
-              + " is above the claimed bound");
-    }
+    List<String> lines = new ArrayList<>(brokenBounds(run.observations()));
     for (Requirement requirement : plan.requirements()) {
       Choice choice = choice(requirement, run);
       if (choice.qualified().isEmpty()) {
@@ -38,6 +29,20 @@ record PlanFindings(List<String> lines) {
       }
     }
     return new PlanFindings(List.copyOf(lines));
+  }
+
+  static List<String> brokenBounds(List<Observation> observations) {
+    return BrokenBound.in(observations).stream()
+        .map(
+            broken ->
+                "finding: bound broken by "
+                    + broken.candidate()
+                    + " on "
+                    + broken.problem()
+                    + ": "
+                    + broken.limits()
+                    + " is above the claimed bound")
+        .toList();
   }
 
   private static Choice choice(Requirement requirement, Run run) {

@@ -17,8 +17,10 @@ import steelyard.harness.execution.Execution;
 import steelyard.harness.execution.PlanExecution;
 import steelyard.harness.plan.Addition;
 import steelyard.harness.plan.Catalogue;
+import steelyard.harness.plan.OwnFiles;
 import steelyard.harness.plan.Plan;
 import steelyard.harness.plan.PlanReader;
+import steelyard.harness.task.Task;
 import steelyard.harness.task.Tasks;
 import steelyard.harness.timing.JmhStopwatch;
 import steelyard.results.run.Run;
@@ -80,6 +82,11 @@ final class RunCommand implements Callable<Integer> {
     RunFolder.prepare(folder, existing);
     PrintWriter err = spec.commandLine().getErr();
     Screen screen = Screen.ofProcess();
+    for (Task<?, ?> task : Tasks.all()) {
+      for (OwnFiles own : plan.files(task.id())) {
+        err.println(own.source().words() + ": " + own.inexact().words());
+      }
+    }
     Instant started = Instant.now();
     try (Bringing bringing =
             new Bringing(Tasks.all(), plan.additions(), bring.isolation(), workers);

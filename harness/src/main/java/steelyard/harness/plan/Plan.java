@@ -43,6 +43,16 @@ public record Plan(
     return timing.map(new PlanCells(weighings)::timings).orElse(List.of());
   }
 
+  /** Returns the files that stand beside families of a task, each once. */
+  public List<OwnFiles> files(String task) {
+    return weighings.stream()
+        .filter(weighing -> weighing.task().equals(task))
+        .flatMap(weighing -> weighing.families().stream())
+        .flatMap(share -> share.files().stream())
+        .distinct()
+        .toList();
+  }
+
   /** Returns this plan with another seed. */
   public Plan withSeed(long other) {
     return new Plan(name, other, additions, timing, weighings, requirements);

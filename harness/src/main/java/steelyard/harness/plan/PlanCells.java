@@ -72,7 +72,7 @@ final class PlanCells {
     List<ProblemCell> cells = new ArrayList<>();
     for (OptionalDouble condition : targets(share)) {
       for (int size : share.sizes()) {
-        for (int repeat = 1; repeat <= weighing.repeats(); repeat++) {
+        for (int repeat = 1; repeat <= weighing.repeats(share); repeat++) {
           cells.add(
               new ProblemCell(
                   index,
@@ -96,7 +96,8 @@ final class PlanCells {
       FamilyShare share = weighing.share(weighing.time().get());
       List<OptionalDouble> targets = targets(share);
       OptionalDouble middle = targets.get(targets.size() / 2);
-      for (int size : effort.sizes().isEmpty() ? share.sizes() : effort.sizes()) {
+      boolean ownSizes = effort.sizes().isEmpty() || !share.generated();
+      for (int size : ownSizes ? share.sizes() : effort.sizes()) {
         cells.add(
             new TimingCell(
                 index, weighing.task(), share.family(), middle, size, weighing.candidates()));

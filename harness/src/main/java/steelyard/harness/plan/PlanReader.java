@@ -12,6 +12,8 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.function.UnaryOperator;
+import steelyard.harness.task.Task;
+import steelyard.harness.task.Tasks;
 import steelyard.results.text.NearestName;
 
 /** Reads plans, fills in what they leave to a default, and holds them against a catalogue. */
@@ -29,8 +31,9 @@ public final class PlanReader {
 
   private final Catalogue catalogue;
   private final UnaryOperator<List<Addition>> expansion;
+  private final List<? extends Task<?, ?>> tasks;
 
-  /** Makes a reader of plans about these tasks. */
+  /** Makes a reader of plans about these tasks, whose files are read for the tasks of the house. */
   public PlanReader(Catalogue catalogue) {
     this(catalogue, UnaryOperator.identity());
   }
@@ -43,6 +46,7 @@ public final class PlanReader {
   public PlanReader(Catalogue catalogue, UnaryOperator<List<Addition>> expansion) {
     this.catalogue = catalogue;
     this.expansion = expansion;
+    this.tasks = Tasks.all();
   }
 
   /**
@@ -91,7 +95,8 @@ public final class PlanReader {
     root.allowOnly(List.of("name", "seed", "timing", "add", "weigh", "require"));
     AdditionReader additionReader = new AdditionReader(catalogue, name, expansion);
     List<Addition> additions = additionReader.read(root.entries("add"));
-    WeighingReader weighingReader = new WeighingReader(catalogue.with(additions));
+    WeighingReader weighingReader =
+        new WeighingReader(catalogue.with(additions), new FileShareReader(tasks, folderOf(name)));
     List<Weighing> weighings = root.entries("weigh").stream().map(weighingReader::read).toList();
     if (weighings.isEmpty()) {
       throw root.fail("weigh", "the plan weighs nothing: it needs at least one [[weigh]] entry");
@@ -128,7 +133,10 @@ public final class PlanReader {
               + effort.forks() * effort.measurement());
     }
     for (Weighing weighing : weighings) {
-      weighing.time().ifPresent(family -> checkReach(table, effort, weighing.task(), family));
+      weighing
+          .time()
+          .filter(family -> weighing.share(family).generated())
+          .ifPresent(family -> checkReach(table, effort, weighing.task(), family));
     }
     return effort;
   }
@@ -205,6 +213,12 @@ public final class PlanReader {
             + "'; "
             + NearestName.hint(name, BuiltInPlans.names()),
         cause);
+  }
+
+  /** Files in a plan are named from where the plan stands. */
+  private static Path folderOf(String name) {
+    Path folder = Path.of(name).toAbsolutePath().getParent();
+    return folder == null ? Path.of("").toAbsolutePath() : folder;
   }
 
   private static String nameOf(String file) {

@@ -120,6 +120,11 @@ final class PlanTable {
     return list(key, "texts", item -> text(key, item));
   }
 
+  /** Returns a list whose items are lists of texts, or single texts for lists of one. */
+  List<List<String>> textLists(String key) {
+    return list(key, "texts, or of lists of texts", item -> textList(key, item));
+  }
+
   List<Integer> wholeNumbers(String key, int min, int max) {
     String kind = "a list of whole numbers";
     return list(key, "whole numbers", item -> (int) wholeNumber(key, item, kind, min, max));
@@ -158,6 +163,18 @@ final class PlanTable {
       throw wrong(key, "must be a text in quotes, on one line and not blank", value);
     }
     return value.textValue();
+  }
+
+  private List<String> textList(String key, JsonNode item) {
+    if (!item.isArray()) {
+      return List.of(text(key, item));
+    }
+    List<String> texts = new ArrayList<>();
+    item.forEach(each -> texts.add(text(key, each)));
+    if (texts.isEmpty()) {
+      throw fail(key, "'" + key + "' has an empty list in it: name at least one, or leave it out");
+    }
+    return texts;
   }
 
   private long wholeNumber(String key, JsonNode value, String kind, long min, long max) {

@@ -6,6 +6,7 @@ import java.util.Locale;
 import java.util.function.Function;
 import java.util.stream.Collectors;
 import steelyard.harness.data.DoubleText;
+import steelyard.harness.input.DataFiles;
 
 /** Writes a plan as TOML, in one fixed order and with every value spelled out. */
 final class PlanWriter {
@@ -51,16 +52,40 @@ final class PlanWriter {
   private void weighing(Weighing weighing) {
     out.append("\n[[weigh]]\n");
     line("task", quoted(weighing.task()));
-    line("families", list(weighing.families(), share -> quoted(share.family())));
+    List<FamilyShare> generated =
+        weighing.families().stream().filter(FamilyShare::generated).toList();
+    if (!generated.isEmpty()) {
+      line("families", list(generated, share -> quoted(share.family())));
+    }
+    files(weighing);
     line("candidates", list(weighing.candidates(), PlanWriter::quoted));
     perFamily(
         "conditions",
-        weighing.families().stream().filter(FamilyShare::controlled).toList(),
+        generated.stream().filter(FamilyShare::controlled).toList(),
         share -> list(share.conditions(), DoubleText::shortest));
-    perFamily("sizes", weighing.families(), share -> list(share.sizes(), String::valueOf));
+    perFamily("sizes", generated, share -> list(share.sizes(), String::valueOf));
     line("repeats", weighing.repeats());
     line("time", quoted(weighing.time().orElse(WeighingReader.NOT_TIMED)));
     line("timeout_ms", weighing.timeoutMs());
+  }
+
+  private void files(Weighing weighing) {
+    List<DataFiles> sources =
+        weighing.families().stream()
+            .flatMap(share -> share.files().stream())
+            .map(OwnFiles::source)
+            .toList();
+    if (!sources.isEmpty()) {
+      line("files", list(sources, PlanWriter::fileList));
+      if (!sources.get(0).columns().isEmpty()) {
+        line("columns", list(sources.get(0).columns(), PlanWriter::quoted));
+      }
+    }
+  }
+
+  private static String fileList(DataFiles source) {
+    List<String> names = source.files().stream().map(file -> quoted(file.toString())).toList();
+    return names.size() == 1 ? names.get(0) : list(names, name -> name);
   }
 
   private void requirement(Requirement requirement) {

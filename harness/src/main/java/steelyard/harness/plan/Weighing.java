@@ -10,7 +10,7 @@ import java.util.Optional;
  * @param task the id of the task
  * @param families what each family contributes
  * @param candidates the ids of the candidates
- * @param repeats problems for each family, condition and size
+ * @param repeats problems for each family that generates them, condition and size
  * @param time the family on whose problems candidates are timed; empty: they are not timed
  * @param timeoutMs how long one call may take, in milliseconds
  */
@@ -40,10 +40,15 @@ public record Weighing(
     return families.stream().filter(s -> s.family().equals(family)).findFirst().orElseThrow();
   }
 
+  /** Returns how many problems alike a share contributes: files hold but one. */
+  int repeats(FamilyShare share) {
+    return share.generated() ? repeats : 1;
+  }
+
   /** Returns how many problems it asks for. */
   long problemCount() {
     return families.stream()
-        .mapToLong(s -> (long) repeats * s.sizes().size() * Math.max(1, s.conditions().size()))
+        .mapToLong(s -> (long) repeats(s) * s.sizes().size() * Math.max(1, s.conditions().size()))
         .sum();
   }
 }

@@ -2,6 +2,7 @@ package steelyard.harness.plan;
 
 import java.util.List;
 import java.util.Optional;
+import java.util.stream.Stream;
 import steelyard.results.text.NearestName;
 
 /** Reads one {@code [[weigh]]} entry and fills in what it leaves to a default. */
@@ -17,12 +18,23 @@ final class WeighingReader {
 
   private static final List<String> KEYS =
       List.of(
-          "task", "families", "candidates", "conditions", "sizes", "repeats", "time", "timeout_ms");
+          "task",
+          "families",
+          "files",
+          "columns",
+          "candidates",
+          "conditions",
+          "sizes",
+          "repeats",
+          "time",
+          "timeout_ms");
 
   private final Catalogue catalogue;
+  private final FileShareReader fileReader;
 
-  WeighingReader(Catalogue catalogue) {
+  WeighingReader(Catalogue catalogue, FileShareReader fileReader) {
     this.catalogue = catalogue;
+    this.fileReader = fileReader;
   }
 
   Weighing read(PlanTable table) {
@@ -72,7 +84,15 @@ final class WeighingReader {
     return wanted;
   }
 
-  private static List<FamilyShare> shares(PlanTable table, Catalogue.TaskEntry task) {
+  /** Files alone leave the families out, unless the entry names some. */
+  private List<FamilyShare> shares(PlanTable table, Catalogue.TaskEntry task) {
+    List<FamilyShare> files = fileReader.shares(table, task.id());
+    return files.isEmpty() || table.has("families")
+        ? Stream.concat(generated(table, task).stream(), files.stream()).toList()
+        : files;
+  }
+
+  private static List<FamilyShare> generated(PlanTable table, Catalogue.TaskEntry task) {
     List<Catalogue.FamilyEntry> families =
         chosen(table, "families", "family", task, task.familyIds()).stream()
             .map(task::family)

@@ -8,7 +8,9 @@ import steelyard.algorithms.dot.DotProduct;
 import steelyard.algorithms.dot.DotProducts;
 import steelyard.problems.Data;
 import steelyard.problems.Family;
+import steelyard.problems.Problem;
 import steelyard.problems.dot.DotFamilies;
+import steelyard.problems.dot.DotProblem;
 import steelyard.problems.dot.Vectors;
 
 /** Binds inner products to pairs of vectors. */
@@ -45,8 +47,18 @@ final class DotTask implements Task<DotProduct, Vectors> {
   }
 
   @Override
+  public List<PartShape> shapes() {
+    return List.of(PartShape.vector("x"), PartShape.vector("y"));
+  }
+
+  @Override
   public Vectors data(List<Data.Part> parts) {
     return new Vectors(Parts.vector(parts, 0), Parts.vector(parts, 1));
+  }
+
+  @Override
+  public Problem<Vectors> problem(Vectors data) {
+    return new DotProblem(data);
   }
 
   @Override

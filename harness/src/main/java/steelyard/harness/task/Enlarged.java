@@ -7,10 +7,11 @@ import org.openjdk.jmh.infra.Blackhole;
 import steelyard.algorithms.Candidate;
 import steelyard.problems.Data;
 import steelyard.problems.Family;
+import steelyard.problems.Problem;
 
 /**
- * A task with candidates beside its own, which stay where they are: the textbook one is still the
- * first.
+ * A task with candidates or families beside its own, which stay where they are: the textbook
+ * candidate is still the first.
  *
  * @param <K> the task's interface
  * @param <D> the kind of input
@@ -19,15 +20,25 @@ final class Enlarged<K, D extends Data> implements Task<K, D> {
 
   private final Task<K, D> task;
   private final List<Candidate<K>> candidates;
+  private final List<Family<D>> families;
 
-  Enlarged(Task<K, D> task, List<Candidate<K>> more) {
+  Enlarged(Task<K, D> task, List<Candidate<K>> candidates, List<Family<D>> families) {
     this.task = task;
-    this.candidates = Stream.concat(task.candidates().stream(), more.stream()).toList();
-    List<String> ids = candidates.stream().map(Candidate::id).toList();
-    for (Candidate<K> each : more) {
-      if (ids.indexOf(each.id()) != ids.lastIndexOf(each.id())) {
+    this.candidates = joined(task.candidates(), candidates);
+    this.families = joined(task.families(), families);
+    requireDistinct("candidates", this.candidates.stream().map(Candidate::id).toList());
+    requireDistinct("families", this.families.stream().map(each -> each.profile().id()).toList());
+  }
+
+  private static <T> List<T> joined(List<T> own, List<T> more) {
+    return Stream.concat(own.stream(), more.stream()).toList();
+  }
+
+  private void requireDistinct(String kind, List<String> ids) {
+    for (String id : ids) {
+      if (ids.indexOf(id) != ids.lastIndexOf(id)) {
         throw new IllegalArgumentException(
-            "task '" + task.id() + "' has two candidates named '" + each.id() + "'");
+            "task '" + task.id() + "' has two " + kind + " named '" + id + "'");
       }
     }
   }
@@ -59,12 +70,22 @@ final class Enlarged<K, D extends Data> implements Task<K, D> {
 
   @Override
   public List<Family<D>> families() {
-    return task.families();
+    return families;
+  }
+
+  @Override
+  public List<PartShape> shapes() {
+    return task.shapes();
   }
 
   @Override
   public D data(List<Data.Part> parts) {
     return task.data(parts);
+  }
+
+  @Override
+  public Problem<D> problem(D data) {
+    return task.problem(data);
   }
 
   @Override

@@ -8,11 +8,16 @@ import steelyard.algorithms.solve.LinearSolver;
 import steelyard.algorithms.solve.LinearSolvers;
 import steelyard.problems.Data;
 import steelyard.problems.Family;
+import steelyard.problems.Problem;
 import steelyard.problems.solve.LinearSystem;
 import steelyard.problems.solve.SystemFamilies;
+import steelyard.problems.solve.SystemProblem;
 
 /** Binds linear solvers to square systems. */
 final class SolveTask implements Task<LinearSolver, LinearSystem> {
+
+  /** The certificate of a larger system takes minutes where it is ill-conditioned. */
+  private static final int LARGEST_SIZE = 1000;
 
   @Override
   public String id() {
@@ -45,8 +50,18 @@ final class SolveTask implements Task<LinearSolver, LinearSystem> {
   }
 
   @Override
+  public List<PartShape> shapes() {
+    return List.of(PartShape.matrix("a", LARGEST_SIZE), PartShape.vector("b", LARGEST_SIZE));
+  }
+
+  @Override
   public LinearSystem data(List<Data.Part> parts) {
     return new LinearSystem(Parts.matrix(parts, 0), Parts.vector(parts, 1));
+  }
+
+  @Override
+  public Problem<LinearSystem> problem(LinearSystem data) {
+    return SystemProblem.of(data);
   }
 
   @Override

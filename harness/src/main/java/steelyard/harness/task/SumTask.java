@@ -8,7 +8,9 @@ import steelyard.algorithms.sum.Summation;
 import steelyard.algorithms.sum.Summations;
 import steelyard.problems.Data;
 import steelyard.problems.Family;
+import steelyard.problems.Problem;
 import steelyard.problems.sum.SumFamilies;
+import steelyard.problems.sum.SumProblem;
 import steelyard.problems.sum.Terms;
 
 /** Binds summations to arrays of terms. */
@@ -45,8 +47,18 @@ final class SumTask implements Task<Summation, Terms> {
   }
 
   @Override
+  public List<PartShape> shapes() {
+    return List.of(PartShape.vector("terms"));
+  }
+
+  @Override
   public Terms data(List<Data.Part> parts) {
     return new Terms(Parts.vector(parts, 0));
+  }
+
+  @Override
+  public Problem<Terms> problem(Terms data) {
+    return new SumProblem(data);
   }
 
   @Override

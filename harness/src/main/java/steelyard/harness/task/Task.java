@@ -6,6 +6,7 @@ import org.openjdk.jmh.infra.Blackhole;
 import steelyard.algorithms.Candidate;
 import steelyard.problems.Data;
 import steelyard.problems.Family;
+import steelyard.problems.Problem;
 
 /**
  * The binding of a task's candidates to its problems. Everything else in the harness works on this
@@ -39,8 +40,19 @@ public interface Task<K, D extends Data> {
   /** Returns the families. */
   List<Family<D>> families();
 
+  /** Returns the arrays that an input is made of, in the order of {@link Data#parts()}. */
+  List<PartShape> shapes();
+
   /** Returns an input made of these arrays, named and ordered as {@link Data#parts()} has them. */
   D data(List<Data.Part> parts);
+
+  /**
+   * Returns the problem of this input, whoever made it.
+   *
+   * @throws IllegalArgumentException if the arrays do not fit together, or one is not finite
+   * @throws steelyard.problems.UncertifiedException if no reference could be certified
+   */
+  Problem<D> problem(D data);
 
   /** Applies a kernel to an input; the answer of a scalar task has one entry. */
   double[] apply(K kernel, D data);
@@ -62,6 +74,15 @@ public interface Task<K, D extends Data> {
    * @throws IllegalArgumentException if two have the same id
    */
   default Task<K, D> with(List<Candidate<K>> more) {
-    return more.isEmpty() ? this : new Enlarged<>(this, more);
+    return more.isEmpty() ? this : new Enlarged<>(this, more, List.of());
+  }
+
+  /**
+   * Returns this task with families beside its own.
+   *
+   * @throws IllegalArgumentException if two have the same id
+   */
+  default Task<K, D> withFamilies(List<Family<D>> more) {
+    return more.isEmpty() ? this : new Enlarged<>(this, List.of(), more);
   }
 }

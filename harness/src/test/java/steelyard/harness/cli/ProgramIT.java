@@ -31,7 +31,7 @@ final class ProgramIT {
   }
 
   @ParameterizedTest
-  @ValueSource(strings = {"list", "run", "choose", "problems"})
+  @ValueSource(strings = {"list", "run", "weigh", "choose", "problems"})
   void everyCommandExplainsItself(String command) {
     Program.Result result = program.run(command, "--help");
     assertThat(result.exitCode()).isZero();
@@ -204,7 +204,7 @@ final class ProgramIT {
         "run small.toml --fast; --fast",
         "run; PLAN",
         "list summ; sum",
-        "weigh; weigh",
+        "weigh; FILE",
         "choose; RUN",
         "choose nowhere --task sum --error 1 --condition-up-to 1 --size 1; nowhere",
         "problems sum; sum",

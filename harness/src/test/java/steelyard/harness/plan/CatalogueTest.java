@@ -8,6 +8,7 @@ import org.apache.commons.rng.UniformRandomProvider;
 import org.junit.jupiter.api.Test;
 import org.openjdk.jmh.infra.Blackhole;
 import steelyard.algorithms.Candidate;
+import steelyard.harness.task.PartShape;
 import steelyard.harness.task.Task;
 import steelyard.problems.Data;
 import steelyard.problems.Family;
@@ -59,6 +60,16 @@ class CatalogueTest {
     @Override
     public List<Family<Data>> families() {
       return List.of(new Silo());
+    }
+
+    @Override
+    public List<PartShape> shapes() {
+      return List.of();
+    }
+
+    @Override
+    public Problem<Data> problem(Data data) {
+      throw new UnsupportedOperationException("a catalogue makes no problem");
     }
 
     @Override

@@ -12,6 +12,7 @@ import java.util.function.UnaryOperator;
 import org.apache.commons.rng.UniformRandomProvider;
 import org.openjdk.jmh.infra.Blackhole;
 import steelyard.algorithms.Candidate;
+import steelyard.harness.task.PartShape;
 import steelyard.harness.task.Task;
 import steelyard.problems.Condition;
 import steelyard.problems.Data;
@@ -60,6 +61,16 @@ record ToyTask(List<Candidate<UnaryOperator<double[]>>> candidates)
   @Override
   public List<Family<Input>> families() {
     return List.of(new ToyFamily());
+  }
+
+  @Override
+  public List<PartShape> shapes() {
+    return List.of(new PartShape("values", false, Integer.MAX_VALUE));
+  }
+
+  @Override
+  public Problem<Input> problem(Input data) {
+    return new ToyProblem(data);
   }
 
   @Override

@@ -94,7 +94,7 @@ class TableReaderTest {
     assertThatThrownBy(() -> TableReader.read(ErrorsTable.SCHEMA, "e", new StringReader(damaged)))
         .hasMessage(
             "e, line 2, column status: \"fine\" is not known here; write one of ok, nan, infinite,"
-                + " malformed, exception, timeout, modified-input, nondeterministic, uncertified,"
+                + " malformed, exception, crashed, timeout, modified-input, nondeterministic, uncertified,"
                 + " not-applicable.");
   }
 
