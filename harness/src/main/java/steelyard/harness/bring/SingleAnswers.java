@@ -14,6 +14,7 @@ import steelyard.problems.Data;
 final class SingleAnswers implements Function<List<Data.Part>, double[]> {
   private final MethodHandle method;
   private final boolean keepsInput;
+  private final boolean isConstant;
   private List<Object> kept = List.of();
   private Object[] rounded = {};
 
@@ -25,6 +26,7 @@ final class SingleAnswers implements Function<List<Data.Part>, double[]> {
             .asSpreader(Object[].class, method.type().parameterCount())
             .asType(MethodType.methodType(Object.class, Object[].class));
     this.keepsInput = keepsInput;
+    isConstant = keepsInput && ConstantMethod.set(this.method);
   }
 
   @Override
@@ -55,7 +57,7 @@ final class SingleAnswers implements Function<List<Data.Part>, double[]> {
   private double[] call(Object[] arguments) {
     Object answer;
     try {
-      answer = (Object) method.invokeExact(arguments);
+      answer = isConstant ? ConstantMethod.call(arguments) : (Object) method.invokeExact(arguments);
     } catch (RuntimeException | Error thrown) {
       throw thrown;
     } catch (Throwable checked) {

@@ -3,9 +3,11 @@ package steelyard.harness.cli;
 import java.time.Instant;
 import java.util.Optional;
 import java.util.TreeMap;
+import steelyard.harness.bring.Origin;
 import steelyard.harness.execution.Execution;
 import steelyard.harness.execution.Libraries;
 import steelyard.harness.execution.Machine;
+import steelyard.harness.plan.Addition;
 import steelyard.harness.plan.Plan;
 import steelyard.results.run.Provenance;
 
@@ -32,7 +34,15 @@ final class RunRecord {
             System.getProperty("java.vm.name"),
             Machine.flags()),
         new Provenance.Machine(Machine.processor(), Machine.cores(), Machine.operatingSystem()),
-        new TreeMap<>(Libraries.versions()),
+        libraries(plan),
         counts);
+  }
+
+  private static TreeMap<String, String> libraries(Plan plan) {
+    TreeMap<String, String> libraries = new TreeMap<>(Libraries.versions());
+    for (Addition addition : plan.additions()) {
+      libraries.put(addition.task() + ":" + addition.id(), Origin.of(addition));
+    }
+    return libraries;
   }
 }
