@@ -79,7 +79,6 @@ final class RunCommand implements Callable<Integer> {
     int workers = workers();
     Path folder = out != null ? out : Path.of("runs", folderName(plan.name()));
     RunFolder.Existing existing = overwrite ? RunFolder.Existing.REPLACE : RunFolder.Existing.KEEP;
-    RunFolder.prepare(folder, existing);
     PrintWriter err = spec.commandLine().getErr();
     Screen screen = Screen.ofProcess();
     for (Task<?, ?> task : Tasks.all()) {
@@ -91,6 +90,7 @@ final class RunCommand implements Callable<Integer> {
     try (Bringing bringing =
             new Bringing(Tasks.all(), plan.additions(), bring.isolation(), workers);
         InterruptWatch watch = new InterruptWatch()) {
+      RunFolder.prepare(folder, existing);
       Execution execution =
           new PlanExecution(
                   bringing.tasks(),
@@ -145,7 +145,23 @@ final class RunCommand implements Callable<Integer> {
     if (only != null) {
       plan = plan.only(only);
     }
+    requireWeighed(additions, plan);
     return noTiming ? plan.withoutTiming() : plan;
+  }
+
+  private static void requireWeighed(List<Addition> additions, Plan plan) {
+    for (Addition addition : additions) {
+      if (plan.weighings().stream().noneMatch(each -> each.task().equals(addition.task()))) {
+        throw new BadInputException(
+            "--add "
+                + addition.task()
+                + ":"
+                + addition.id()
+                + ": nothing that is to be run weighs the task '"
+                + addition.task()
+                + "'");
+      }
+    }
   }
 
   private int workers() {

@@ -2,6 +2,7 @@ package steelyard.harness.cli;
 
 import java.time.Instant;
 import java.util.Optional;
+import java.util.SortedMap;
 import java.util.TreeMap;
 import steelyard.harness.bring.Origin;
 import steelyard.harness.execution.Execution;
@@ -38,8 +39,8 @@ final class RunRecord {
         counts);
   }
 
-  private static TreeMap<String, String> libraries(Plan plan) {
-    TreeMap<String, String> libraries = new TreeMap<>(Libraries.versions());
+  private static SortedMap<String, String> libraries(Plan plan) {
+    SortedMap<String, String> libraries = new TreeMap<>(Libraries.versions());
     for (Addition addition : plan.additions()) {
       libraries.put(addition.task() + ":" + addition.id(), Origin.of(addition));
     }
