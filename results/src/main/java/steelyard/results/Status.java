@@ -10,7 +10,7 @@ public enum Status {
   NAN,
   /** The answer is, or contains, an infinity although the exact answer is finite. */
   INFINITE,
-  /** The answer is null or has the wrong length. */
+  /** The answer is null or has the wrong length, or what a program said is no answer. */
   MALFORMED,
   /** The candidate threw. */
   EXCEPTION,

@@ -2,12 +2,17 @@ package steelyard.harness.bring;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import java.util.function.Function;
+import java.util.function.Supplier;
+import java.util.stream.Stream;
 import steelyard.algorithms.Candidate;
 import steelyard.harness.plan.Addition;
+import steelyard.harness.run.Mishap;
 import steelyard.harness.task.Task;
 import steelyard.harness.task.Tasks;
 import steelyard.problems.Data;
+import steelyard.results.Status;
 import steelyard.results.text.NearestName;
 
 /**
@@ -18,7 +23,7 @@ public final class Bringing implements AutoCloseable {
   private static final String SERVICES = "services";
 
   private final Isolation isolation;
-  private final List<JvmPool> pools = new ArrayList<>();
+  private final List<ServantPool> pools = new ArrayList<>();
   private final List<Task<?, ?>> tasks = new ArrayList<>();
 
   /** Where candidates from outside run during the accuracy phase. */
@@ -100,20 +105,66 @@ public final class Bringing implements AutoCloseable {
   }
 
   private <K, D extends Data> Candidate<K> candidate(Task<K, D> task, Addition addition) {
+    Optional<ProgramCommand> command = ProgramCommand.find(addition.use());
+    if (command.isPresent()) {
+      String source = "the program " + command.get().words().get(0);
+      K kernel =
+          task.kernel(
+              oneNumberIfScalar(
+                  task, pool(() -> ProgramProcess.start(addition.task(), command.get().words()))));
+      return Candidate.of(addition.id(), kernel, addition.use(), "not stated", source);
+    }
+    if (NativeFunction.isNative(addition.use())) {
+      NativeFunction function =
+          NativeFunction.parse(addition.use(), Signature.of(task.kernelType()));
+      K kernel =
+          isolation == Isolation.SAME_JVM
+              ? kernel(task, addition, false)
+              : task.kernel(pool(() -> CandidateProcess.start(addition)));
+      String source = "the shared library " + function.library().getFileName();
+      return Candidate.of(addition.id(), kernel, addition.use(), "not stated", source);
+    }
     FoundCode code = found(task, addition);
     return Candidate.of(
             addition.id(),
             isolation == Isolation.SAME_JVM
                 ? KernelMaker.make(task, code, false)
-                : task.kernel(pool(addition)),
+                : task.kernel(pool(() -> CandidateProcess.start(addition))),
             addition.use(),
             "not stated",
             addition.jars().isEmpty() ? "the class path" : String.join(", ", addition.jars()))
         .inPrecision(code.precisionBits());
   }
 
-  private Function<List<Data.Part>, double[]> pool(Addition addition) {
-    JvmPool pool = new JvmPool(addition);
+  /** Says whether a candidate from outside can be timed: a program answers through pipes. */
+  public static boolean isTimed(Addition addition) {
+    return !ProgramCommand.isProgram(addition.use());
+  }
+
+  /** Returns what a JVM must be told that is to run a candidate from outside. */
+  public static Stream<String> jvmFlags(Addition addition) {
+    return NativeFunction.isNative(addition.use())
+        ? Stream.of("--enable-native-access=ALL-UNNAMED")
+        : Stream.empty();
+  }
+
+  private static Function<List<Data.Part>, double[]> oneNumberIfScalar(
+      Task<?, ?> task, Function<List<Data.Part>, double[]> answers) {
+    if (!Signature.of(task.kernelType()).isScalar()) {
+      return answers;
+    }
+    return parts -> {
+      double[] answer = answers.apply(parts);
+      if (answer.length != 1) {
+        throw new Mishap(
+            Status.MALFORMED, "the program gave " + answer.length + " numbers, not one");
+      }
+      return answer;
+    };
+  }
+
+  private Function<List<Data.Part>, double[]> pool(Supplier<Servant> starter) {
+    ServantPool pool = new ServantPool(starter);
     pools.add(pool);
     return pool;
   }
@@ -130,12 +181,22 @@ public final class Bringing implements AutoCloseable {
    * @throws BringException if its code does not fit
    */
   public static <K> K kernel(Task<K, ?> task, Addition addition, boolean keepsInput) {
+    if (NativeFunction.isNative(addition.use())) {
+      Signature signature = Signature.of(task.kernelType());
+      int arrays = signature.kernelMethod().getParameterCount() + (signature.isScalar() ? 0 : 1);
+      return task.kernel(
+          new NativeAnswers(
+              NativeFunction.parse(addition.use(), signature),
+              arrays,
+              signature.isScalar(),
+              keepsInput));
+    }
     return KernelMaker.make(task, found(task, addition), keepsInput);
   }
 
   /** Ends the JVMs of the candidates. */
   @Override
   public void close() {
-    pools.forEach(JvmPool::close);
+    pools.forEach(ServantPool::close);
   }
 }

@@ -17,11 +17,8 @@ import steelyard.harness.run.Mishap;
 import steelyard.problems.Data;
 import steelyard.results.Status;
 
-/**
- * A JVM in which one candidate runs, seen from the harness. One thread at a time uses it; when that
- * thread is interrupted during a call, the JVM is destroyed.
- */
-final class CandidateProcess implements AutoCloseable {
+/** A JVM in which one candidate runs, seen from the harness. */
+final class CandidateProcess implements Servant {
 
   // The heap is bounded, so that a candidate that allocates without end does not take the machine
   // with it, and a crash leaves no files behind.
@@ -61,9 +58,7 @@ final class CandidateProcess implements AutoCloseable {
     String java = Path.of(System.getProperty("java.home"), "bin", "java").toString();
     List<String> command = new ArrayList<>(List.of(java));
     command.addAll(FLAGS);
-    if (Runtime.version().feature() >= 22) {
-      command.add("--enable-native-access=ALL-UNNAMED");
-    }
+    Bringing.jvmFlags(addition).forEach(command::add);
     command.addAll(
         List.of("-cp", System.getProperty("java.class.path"), CandidateJvm.class.getName()));
     try {
@@ -77,12 +72,8 @@ final class CandidateProcess implements AutoCloseable {
     }
   }
 
-  /**
-   * Waits until the kernel is made; the first caller alone does.
-   *
-   * @throws Mishap if it cannot be
-   */
-  void awaitReady() {
+  @Override
+  public void awaitReady() {
     if (!ready) {
       Message message = take();
       if (message.kind() != Message.Kind.READY) {
@@ -92,12 +83,8 @@ final class CandidateProcess implements AutoCloseable {
     }
   }
 
-  /**
-   * Lets the candidate answer.
-   *
-   * @throws Mishap if there is no answer; {@link #isUsable} then says whether another can follow
-   */
-  double[] answer(List<Data.Part> parts) {
+  @Override
+  public double[] answer(List<Data.Part> parts) {
     try {
       Message.input(parts).write(out);
     } catch (IOException gone) {
@@ -124,7 +111,8 @@ final class CandidateProcess implements AutoCloseable {
     }
   }
 
-  boolean isUsable() {
+  @Override
+  public boolean isUsable() {
     return process.isAlive();
   }
 
@@ -161,10 +149,8 @@ final class CandidateProcess implements AutoCloseable {
     }
   }
 
-  /** Ends the JVM and whatever it started. */
   @Override
   public void close() {
-    process.descendants().forEach(ProcessHandle::destroyForcibly);
-    process.destroyForcibly();
+    ProcessTree.end(process);
   }
 }

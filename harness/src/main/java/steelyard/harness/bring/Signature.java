@@ -23,6 +23,11 @@ record Signature(Method kernelMethod) {
             .orElseThrow());
   }
 
+  /** Says whether the answer is one number. */
+  boolean isScalar() {
+    return !kernelMethod.getReturnType().isArray();
+  }
+
   boolean isDouble(Method method) {
     return Arrays.equals(method.getParameterTypes(), kernelMethod.getParameterTypes())
         && method.getReturnType() == kernelMethod.getReturnType();

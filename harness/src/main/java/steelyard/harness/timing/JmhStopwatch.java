@@ -9,6 +9,7 @@ import java.util.Collection;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import java.util.stream.Stream;
 import org.openjdk.jmh.profile.GCProfiler;
 import org.openjdk.jmh.results.Result;
 import org.openjdk.jmh.results.RunResult;
@@ -21,6 +22,7 @@ import org.openjdk.jmh.runner.options.OptionsBuilder;
 import org.openjdk.jmh.runner.options.TimeValue;
 import org.openjdk.jmh.runner.options.VerboseMode;
 import org.openjdk.jmh.util.Statistics;
+import steelyard.harness.bring.Bringing;
 import steelyard.harness.plan.Addition;
 import steelyard.harness.plan.TimingEffort;
 
@@ -62,6 +64,10 @@ public final class JmhStopwatch implements Stopwatch {
   @Override
   public Score measure(String task, String candidate, Path data, TimingEffort effort)
       throws TimingException {
+    Optional<Addition> added = added(task, candidate);
+    if (added.isPresent() && !Bringing.isTimed(added.get())) {
+      throw new TimingException("not timed: a program answers through pipes", null);
+    }
     try {
       Collection<RunResult> results = run(options(task, candidate, data, effort));
       if (results.isEmpty()) {
@@ -114,13 +120,10 @@ public final class JmhStopwatch implements Stopwatch {
   }
 
   private Options options(String task, String candidate, Path data, TimingEffort effort) {
-    Optional<Addition> added =
-        additions.stream()
-            .filter(each -> each.task().equals(task) && each.id().equals(candidate))
-            .findFirst();
+    Optional<Addition> added = added(task, candidate);
     TimeValue iteration = TimeValue.milliseconds(effort.iterationMs());
     return new OptionsBuilder()
-        .jvmArgs(FORK_FLAGS.toArray(String[]::new))
+        .jvmArgs(flags(added).toArray(String[]::new))
         .include("^" + KernelBenchmark.class.getName().replace(".", "\\.") + "\\.call$")
         .param("task", task)
         .param("candidate", candidate)
@@ -136,6 +139,16 @@ public final class JmhStopwatch implements Stopwatch {
         .verbosity(VerboseMode.SILENT)
         .shouldFailOnError(true)
         .build();
+  }
+
+  private static List<String> flags(Optional<Addition> added) {
+    return Stream.concat(FORK_FLAGS.stream(), added.stream().flatMap(Bringing::jvmFlags)).toList();
+  }
+
+  private Optional<Addition> added(String task, String candidate) {
+    return additions.stream()
+        .filter(each -> each.task().equals(task) && each.id().equals(candidate))
+        .findFirst();
   }
 
   private static Score score(RunResult result) {
