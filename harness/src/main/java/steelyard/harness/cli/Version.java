@@ -1,19 +1,15 @@
 package steelyard.harness.cli;
 
 import picocli.CommandLine.IVersionProvider;
+import steelyard.harness.execution.ProgramVersion;
 
 /** The version of the program. */
 final class Version implements IVersionProvider {
 
   Version() {}
 
-  static String text() {
-    String version = Version.class.getPackage().getImplementationVersion();
-    return version == null ? "development" : version;
-  }
-
   @Override
   public String[] getVersion() {
-    return new String[] {"steelyard " + text()};
+    return new String[] {"steelyard " + ProgramVersion.text()};
   }
 }

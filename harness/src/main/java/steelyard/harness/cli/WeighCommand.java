@@ -5,7 +5,6 @@ import java.io.PrintWriter;
 import java.nio.file.Path;
 import java.time.Duration;
 import java.util.List;
-import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.concurrent.Callable;
 import picocli.CommandLine;
@@ -15,16 +14,14 @@ import picocli.CommandLine.Parameters;
 import steelyard.algorithms.Candidate;
 import steelyard.harness.bring.Bringing;
 import steelyard.harness.execution.Execution;
+import steelyard.harness.execution.FileWeighing;
 import steelyard.harness.execution.PlanExecution;
 import steelyard.harness.execution.Workbench;
 import steelyard.harness.input.DataFiles;
 import steelyard.harness.input.OwnFamily;
 import steelyard.harness.plan.Addition;
 import steelyard.harness.plan.Catalogue;
-import steelyard.harness.plan.FamilyShare;
 import steelyard.harness.plan.Plan;
-import steelyard.harness.plan.TimingEffort;
-import steelyard.harness.plan.Weighing;
 import steelyard.harness.task.Task;
 import steelyard.harness.task.Tasks;
 import steelyard.harness.timing.JmhStopwatch;
@@ -48,7 +45,6 @@ import steelyard.results.text.NearestName;
 final class WeighCommand implements Callable<Integer> {
 
   private static final Duration PATIENCE = Duration.ofMinutes(10);
-  private static final TimingEffort EFFORT = new TimingEffort(1, 3, 5, 100, List.of());
 
   @CommandLine.Spec private CommandLine.Model.CommandSpec spec;
 
@@ -115,7 +111,7 @@ final class WeighCommand implements Callable<Integer> {
         .lines()
         .forEach(output::println);
     output.flush();
-    Plan plan = plan(task, family, chosen, additions);
+    Plan plan = new FileWeighing(chosen, additions, !noTiming, timeoutMs).plan(task, family);
     PrintWriter err = spec.commandLine().getErr();
     try (InterruptWatch watch = new InterruptWatch()) {
       Execution execution =
@@ -177,20 +173,5 @@ final class WeighCommand implements Callable<Integer> {
             1,
             ProblemId.DEFAULT_SEED)
         .toString();
-  }
-
-  private Plan plan(
-      Task<?, ?> task, OwnFamily<?> family, List<String> chosen, List<Addition> additions) {
-    String name = family.profile().id();
-    Weighing weighing =
-        new Weighing(
-            task.id(),
-            List.of(new FamilyShare(name, List.of(), List.of(family.size()))),
-            chosen,
-            1,
-            Optional.of(name),
-            timeoutMs);
-    Optional<TimingEffort> effort = noTiming ? Optional.empty() : Optional.of(EFFORT);
-    return new Plan(name, ProblemId.DEFAULT_SEED, additions, effort, List.of(weighing), List.of());
   }
 }

@@ -1,29 +1,27 @@
-package steelyard.harness.cli;
+package steelyard.harness.execution;
 
 import java.time.Instant;
 import java.util.Optional;
 import java.util.SortedMap;
 import java.util.TreeMap;
 import steelyard.harness.bring.Origin;
-import steelyard.harness.execution.Execution;
-import steelyard.harness.execution.Libraries;
-import steelyard.harness.execution.Machine;
 import steelyard.harness.plan.Addition;
 import steelyard.harness.plan.Plan;
 import steelyard.results.run.Provenance;
 
 /** Collects what a run records of where it comes from. */
-final class RunRecord {
+public final class RunRecord {
 
   private RunRecord() {}
 
-  static Provenance of(Plan plan, Execution execution, Instant started, Instant ended) {
+  /** Returns the record of a run. */
+  public static Provenance of(Plan plan, Execution execution, Instant started, Instant ended) {
     TreeMap<String, Long> counts = new TreeMap<>();
     counts.put("observations", (long) execution.observations().size());
     counts.put("timings", (long) execution.timings().size());
     counts.put("problems_planned", (long) plan.problems().size());
     return new Provenance(
-        Version.text(),
+        ProgramVersion.text(),
         plan.name(),
         plan.seed(),
         started,
