@@ -40,6 +40,7 @@ final class CandidateProcess implements Servant {
   private final BlockingQueue<Optional<Message>> replies = new LinkedBlockingQueue<>();
 
   private boolean ready;
+  private volatile boolean closed;
 
   private CandidateProcess(Process process) {
     this.process = process;
@@ -113,7 +114,7 @@ final class CandidateProcess implements Servant {
 
   @Override
   public boolean isUsable() {
-    return process.isAlive();
+    return !closed && process.isAlive();
   }
 
   private Message take() {
@@ -151,6 +152,7 @@ final class CandidateProcess implements Servant {
 
   @Override
   public void close() {
+    closed = true;
     ProcessTree.end(process);
   }
 }

@@ -34,6 +34,7 @@ final class ProgramProcess implements Servant {
   private final Thread complaints;
   private volatile String lastComplaint = "";
   private boolean ready;
+  private volatile boolean closed;
   private long problems;
 
   private ProgramProcess(Process process) {
@@ -97,11 +98,12 @@ final class ProgramProcess implements Servant {
 
   @Override
   public boolean isUsable() {
-    return process.isAlive();
+    return !closed && process.isAlive();
   }
 
   @Override
   public void close() {
+    closed = true;
     ProcessTree.end(process);
   }
 

@@ -10,8 +10,7 @@ import steelyard.problems.Data;
 
 /**
  * A short fingerprint of an input: the first 16 hex digits of the SHA-256 of its parts' names,
- * shapes and bits. Inputs that differ in the sign of a zero or in the payload of a NaN differ here
- * too.
+ * shapes and bits. Inputs that differ in the sign of a zero differ here too; every NaN is the same.
  */
 public final class DataDigest {
 
@@ -65,7 +64,8 @@ public final class DataDigest {
     ByteBuffer bits = ByteBuffer.allocate(Integer.BYTES + Double.BYTES * values.length);
     bits.putInt(values.length);
     for (double value : values) {
-      bits.putLong(Double.doubleToRawLongBits(value));
+      // Which NaN an operation gives depends on how it was compiled.
+      bits.putLong(Double.doubleToLongBits(value));
     }
     sha256.update(bits.flip());
   }
