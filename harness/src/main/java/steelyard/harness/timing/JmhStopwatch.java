@@ -38,6 +38,10 @@ public final class JmhStopwatch implements Stopwatch {
   private static final List<String> FORK_FLAGS =
       List.of("-XX:+UseSerialGC", "-Xms96m", "-Xmn32m", "-XX:+AlwaysPreTouch");
 
+  // What the start of a fork and a single call may take at most.
+  private static final Duration START = Duration.ofSeconds(30);
+  private static final Duration LONGEST_CALL = Duration.ofSeconds(10);
+
   private static final long PAUSE_MS = 500;
   private static final double CONFIDENCE = 0.999;
   private static final String ALLOCATION = "gc.alloc.rate.norm";
@@ -68,18 +72,31 @@ public final class JmhStopwatch implements Stopwatch {
     if (added.isPresent() && !Bringing.isTimed(added.get())) {
       throw new TimingException("not timed: a program answers through pipes", null);
     }
-    try {
+    Duration limit = limit(effort);
+    ForkWatch watch = new ForkWatch(limit);
+    try (watch) {
       Collection<RunResult> results = run(options(task, candidate, data, effort));
       if (results.isEmpty()) {
         throw new TimingException("JMH gave no result", null);
       }
       return score(results.iterator().next());
     } catch (RunnerException failed) {
+      if (watch.hasFired()) {
+        throw new TimingException(
+            "a call did not return within " + limit.toSeconds() + " s of timing", failed);
+      }
       throw new TimingException(
           "the timed program failed: "
               + String.valueOf(failed.getMessage()).lines().findFirst().orElse("no reason given"),
           failed);
     }
+  }
+
+  private static Duration limit(TimingEffort effort) {
+    long iterations = (long) effort.warmup() + effort.measurement();
+    return START
+        .plus(LONGEST_CALL.plusMillis(effort.iterationMs()).multipliedBy(iterations))
+        .multipliedBy(effort.forks());
   }
 
   /** Waits its turn: JMH lets one run at a time measure on a machine. */

@@ -68,4 +68,12 @@ class ScaledSystemTest {
     assertThat(ScaledSystem.magnitude(Double.MIN_VALUE)).isEqualTo(-1073);
     assertThat(ScaledSystem.magnitude(-Double.MAX_VALUE)).isEqualTo(1024);
   }
+
+  @Test
+  void addsUpTheMagnitudesOfEachRow() {
+    double[][] a = {{0.5, -0.25, 0}, {0.5, 0.5, -0.75}, {0, 0.625, 0.5}};
+    ScaledSystem scaled = new ScaledSystem(a, new double[] {0.5, 0.5, 0.5});
+    assertThat(scaled.matrix).containsExactly(0.5, -0.25, 0, 0.5, 0.5, -0.75, 0, 0.625, 0.5);
+    assertThat(scaled.absoluteRowSums()).containsExactly(0.75, 1.75, 1.125);
+  }
 }
