@@ -16,6 +16,15 @@ public final class Scales {
     return total + lost;
   }
 
+  /** Returns the total of a ledger as it was computed before. */
+  public static double plainTotal(double[] kilograms) {
+    double total = 0;
+    for (double each : kilograms) {
+      total += each;
+    }
+    return total;
+  }
+
   /** Returns the total of a ledger as the display beside the gate has it, in tenths of a ton. */
   public static double displayed(double[] kilograms) {
     double total = 0;

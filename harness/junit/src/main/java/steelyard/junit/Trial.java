@@ -1,105 +1,94 @@
 package steelyard.junit;
 
-import java.time.Duration;
-import java.util.ArrayList;
-import java.util.Arrays;
+import java.util.HashSet;
 import java.util.List;
-import java.util.Locale;
-import java.util.OptionalDouble;
-import java.util.stream.Collectors;
+import java.util.Optional;
+import java.util.Set;
+import java.util.function.UnaryOperator;
+import steelyard.algorithms.Bound;
+import steelyard.algorithms.Candidate;
+import steelyard.algorithms.Scope;
+import steelyard.harness.task.Task;
+import steelyard.harness.task.Tasks;
+import steelyard.problems.Data;
 
-/** On which problems a kernel is tried; what is not said is left to the defaults of plans. */
-record Trial(
-    List<String> families,
-    OptionalDouble largestCondition,
-    List<Integer> sizes,
-    int repeats,
-    long seed,
-    long timeoutMs) {
-  private static final double CONDITION_STEP = 100;
+/**
+ * A candidate, and the problems that it is to be tried on.
+ *
+ * @param task the task
+ * @param candidate the candidate
+ * @param scenario which problems
+ * @param <K> the task's interface
+ * @param <D> the kind of input
+ */
+record Trial<K, D extends Data>(Task<K, D> task, Candidate<K> candidate, Scenario<D> scenario) {
 
-  static final Trial STANDARD =
-      new Trial(List.of(), OptionalDouble.empty(), List.of(), 3, 1, 10_000);
+  private static final String BASELINE = "baseline";
 
-  Trial onFamilies(List<String> wanted) {
-    return new Trial(wanted, largestCondition, sizes, repeats, seed, timeoutMs);
-  }
-
-  Trial upToCondition(double condition) {
-    if (!(condition >= 1)) {
-      throw new IllegalArgumentException(
-          "the largest condition number must be at least 1, found " + condition);
+  /** Returns the trial of a candidate on the usual problems of the task with its interface. */
+  static <K> Trial<K, ?> usual(Class<K> kernelType, Candidate<K> candidate) {
+    for (Task<?, ?> task : Tasks.all()) {
+      if (task.kernelType() == kernelType) {
+        return usual(task, candidate);
+      }
     }
-    return new Trial(families, OptionalDouble.of(condition), sizes, repeats, seed, timeoutMs);
+    throw new IllegalArgumentException("no task has the interface " + kernelType.getName());
   }
 
-  Trial ofSizes(int... wanted) {
-    return new Trial(
-        families,
-        largestCondition,
-        Arrays.stream(wanted).boxed().toList(),
-        repeats,
-        seed,
-        timeoutMs);
+  // The task's interface is the candidate's, as was compared.
+  @SuppressWarnings("unchecked")
+  private static <K, D extends Data> Trial<K, D> usual(Task<?, D> task, Candidate<K> candidate) {
+    return new Trial<>((Task<K, D>) task, candidate, Scenario.usual(task));
   }
 
-  Trial withRepeats(int wanted) {
-    return new Trial(families, largestCondition, sizes, wanted, seed, timeoutMs);
+  Trial<K, D> on(List<String> families) {
+    return with(scenario.on(task, families));
   }
 
-  Trial withSeed(long wanted) {
-    return new Trial(families, largestCondition, sizes, repeats, wanted, timeoutMs);
+  Trial<K, D> except(List<String> families) {
+    return with(scenario.except(task, families));
   }
 
-  Trial withTimeout(Duration timeout) {
-    return new Trial(families, largestCondition, sizes, repeats, seed, timeout.toMillis());
+  Trial<K, D> with(UnaryOperator<Scenario<D>> change) {
+    return with(change.apply(scenario));
   }
 
-  /** Returns the plan that tries candidates of a task on these problems. */
-  String plan(String task, List<String> candidates) {
-    StringBuilder plan = new StringBuilder("name = \"accuracy\"\n");
-    plan.append("seed = ").append(seed).append("\n[[weigh]]\n");
-    plan.append("task = \"").append(task).append("\"\n");
-    plan.append("candidates = ").append(quoted(candidates)).append('\n');
-    if (!families.isEmpty()) {
-      plan.append("families = ").append(quoted(families)).append('\n');
+  Trial<K, D> requiring(List<String> traits) {
+    Set<String> all = new HashSet<>(candidate.scope().traits());
+    all.addAll(traits);
+    Scope scope = new Scope(all, candidate.scope().maxSize());
+    return new Trial<>(task, candidate.within(scope), scenario);
+  }
+
+  Trial<K, D> claiming(Bound bound) {
+    return new Trial<>(task, candidate.claiming(bound), scenario);
+  }
+
+  void check(Check check) {
+    check(check, List.of(candidate));
+  }
+
+  void compare(K baseline, double factor) {
+    String id = candidate.id().equals(BASELINE) ? BASELINE + "-2" : BASELINE;
+    Candidate<K> other =
+        Candidate.of(id, baseline, "what the kernel is compared to", "not stated", "this test")
+            .within(candidate.scope());
+    check(new BaselineCheck(id, factor), List.of(candidate, other));
+  }
+
+  private void check(Check check, List<Candidate<K>> candidates) {
+    Outcome outcome = new Experiment<>(task, candidates, scenario).run();
+    Optional<Check.Finding> finding =
+        outcome.triedByFamily().isEmpty()
+            ? Optional.of(Check.Finding.ofNothing("nothing was tried"))
+            : check.finding(outcome);
+    if (finding.isPresent()) {
+      throw new FailureText<>(task, candidate, scenario, outcome)
+          .error(check.claim(), finding.get());
     }
-    if (largestCondition.isPresent()) {
-      plan.append("conditions = ").append(conditions(largestCondition.getAsDouble())).append('\n');
-    }
-    if (!sizes.isEmpty()) {
-      plan.append("sizes = ").append(sizes).append('\n');
-    }
-    plan.append("repeats = ").append(repeats).append('\n');
-    plan.append("timeout_ms = ").append(timeoutMs).append('\n');
-    return plan.toString();
   }
 
-  private static List<String> conditions(double largest) {
-    List<String> conditions = new ArrayList<>();
-    for (double condition = 1; condition < largest; condition *= CONDITION_STEP) {
-      conditions.add(String.format(Locale.ROOT, "%e", condition));
-    }
-    conditions.add(String.format(Locale.ROOT, "%e", largest));
-    return conditions;
-  }
-
-  private static String quoted(List<String> names) {
-    return names.stream()
-        .map(name -> "\"" + name.replace("\\", "\\\\").replace("\"", "\\\"") + "\"")
-        .collect(Collectors.joining(", ", "[", "]"));
-  }
-
-  /** Returns what was tried, for a message. */
-  String text() {
-    return (families.isEmpty() ? "all families" : String.join(", ", families))
-        + (largestCondition.isPresent()
-            ? ", condition numbers up to " + largestCondition.getAsDouble()
-            : "")
-        + (sizes.isEmpty()
-            ? ""
-            : ", n = " + sizes.stream().map(String::valueOf).collect(Collectors.joining(", ")))
-        + ", seed "
-        + seed;
+  private Trial<K, D> with(Scenario<D> other) {
+    return new Trial<>(task, candidate, other);
   }
 }

@@ -1,5 +1,6 @@
 /**
- * Assertions on the accuracy of a kernel, for the tests of whoever owns it. They measure with the
- * harness and say what they found; no error is computed here, and no verdict made.
+ * Assertions on the accuracy of a kernel, for the tests of whoever owns it: {@code Accuracy} is
+ * public, the rest is internal. They try problems with the harness and show the worst; no error is
+ * computed here, no verdict made and no time taken.
  */
 package steelyard.junit;

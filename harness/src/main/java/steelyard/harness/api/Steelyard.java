@@ -1,35 +1,16 @@
 package steelyard.harness.api;
 
-import java.io.IOException;
-import java.io.UncheckedIOException;
 import java.nio.file.Path;
-import java.time.Duration;
-import java.time.Instant;
-import java.util.ArrayList;
-import java.util.HashSet;
 import java.util.List;
-import java.util.Set;
 import steelyard.algorithms.Candidate;
 import steelyard.harness.bring.Bringing;
-import steelyard.harness.execution.Execution;
-import steelyard.harness.execution.FileWeighing;
-import steelyard.harness.execution.PlanExecution;
-import steelyard.harness.execution.RunRecord;
 import steelyard.harness.execution.Workbench;
 import steelyard.harness.export.ExportedProblem;
 import steelyard.harness.export.ProblemExport;
 import steelyard.harness.input.DataFiles;
-import steelyard.harness.input.OwnFamily;
-import steelyard.harness.plan.Catalogue;
 import steelyard.harness.plan.Plan;
-import steelyard.harness.plan.PlanReader;
-import steelyard.harness.run.Interruption;
 import steelyard.harness.run.Progress;
 import steelyard.harness.task.Task;
-import steelyard.harness.task.Tasks;
-import steelyard.harness.timing.JmhStopwatch;
-import steelyard.harness.timing.Stopwatch;
-import steelyard.harness.timing.TimingException;
 import steelyard.problems.Data;
 import steelyard.problems.Problem;
 import steelyard.problems.ProblemId;
@@ -40,39 +21,34 @@ import steelyard.results.run.Run;
 import steelyard.results.run.RunFolder;
 
 /**
- * Steelyard as a library. Objects are immutable; each {@code with} returns another one.
+ * Steelyard as a library. Objects are immutable; each method that adjusts something returns another
+ * one. Nothing is printed, and nothing is written unless a method says so.
  *
  * <p>What is wrong with an argument, a plan or a file is said by a runtime exception whose message
- * is one sentence.
+ * is one sentence. A thread that is interrupted leaves off early and returns what is complete;
+ * {@code run.provenance().complete()} tells.
  */
 public final class Steelyard {
-  private static final Duration PATIENCE = Duration.ofMinutes(10);
-  private static final int TIMEOUT_MS = 10_000;
 
-  private final List<Task<?, ?>> tasks;
-  private final Set<String> fromThisJvm;
-  private final int threads;
-  private final boolean isTimed;
+  private final Bench bench;
 
-  private Steelyard(List<Task<?, ?>> tasks, Set<String> fromThisJvm, int threads, boolean isTimed) {
-    this.tasks = List.copyOf(tasks);
-    this.fromThisJvm = Set.copyOf(fromThisJvm);
-    this.threads = threads;
-    this.isTimed = isTimed;
+  private Steelyard(Bench bench) {
+    this.bench = bench;
   }
 
   /** Returns one with the tasks, families and candidates that ship with it. */
   public static Steelyard standard() {
-    return new Steelyard(Tasks.all(), Set.of(), Runtime.getRuntime().availableProcessors(), true);
+    return new Steelyard(Bench.ofTheHouse());
   }
 
   /**
-   * Returns one with another candidate, which runs in this JVM. It is not timed, because times are
-   * taken in JVMs of their own; code in a jar is, if a plan names it.
+   * Returns one with another candidate, which runs in this JVM and takes part wherever its task is
+   * weighed. It is not timed, because times are taken in JVMs of their own; {@linkplain #withCode
+   * code that is named} is.
    *
    * @param kernelType the interface of its task, such as {@code Summation.class}
    * @param id its id: lower case letters, digits and hyphens
-   * @param kernel the candidate
+   * @param kernel the candidate; it must not modify its input
    * @throws IllegalArgumentException if no task has this interface, or it has such a candidate
    */
   public <K> Steelyard with(Class<K> kernelType, String id, K kernel) {
@@ -82,31 +58,27 @@ public final class Steelyard {
   }
 
   /**
-   * Returns one with another candidate, which runs in this JVM and is not timed.
+   * Returns one with another candidate, with all that it says of itself: the bound that it claims,
+   * the problems that it is for, its precision. It runs in this JVM and is not timed.
    *
    * @throws IllegalArgumentException if no task has this interface, or it has such a candidate
    */
   public <K> Steelyard with(Class<K> kernelType, Candidate<K> candidate) {
-    List<Task<?, ?>> more = new ArrayList<>();
-    Set<String> here = new HashSet<>(fromThisJvm);
-    for (Task<?, ?> task : tasks) {
-      if (task.kernelType() == kernelType) {
-        more.add(enlarged(task, candidate));
-        here.add(task.id() + ":" + candidate.id());
-      } else {
-        more.add(task);
-      }
-    }
-    if (here.size() == fromThisJvm.size()) {
-      throw new IllegalArgumentException("no task has the interface " + kernelType.getName());
-    }
-    return new Steelyard(more, here, threads, isTimed);
+    return new Steelyard(bench.with(kernelType, candidate));
   }
 
-  // The task's interface is the candidate's, as was compared.
-  @SuppressWarnings("unchecked")
-  private static <K, D extends Data> Task<K, D> enlarged(Task<?, ?> task, Candidate<K> candidate) {
-    return ((Task<K, D>) task).with(List.of(candidate));
+  /**
+   * Returns one with another candidate that is code by its name, as {@code --add} takes it. It is
+   * timed, and is tried in a JVM of its own unless {@link #inThisJvm} says otherwise.
+   *
+   * @param task the id of its task, such as {@code sum}
+   * @param id its id: lower case letters, digits and hyphens
+   * @param code such as {@code com.acme.Totals#net}, a method, or a class that implements the
+   *     task's interface
+   * @param jars the jars and folders with its classes; none: the class path
+   */
+  public Steelyard withCode(String task, String id, String code, Path... jars) {
+    return new Steelyard(bench.adding(task, id, code, List.of(jars)));
   }
 
   /**
@@ -115,36 +87,56 @@ public final class Steelyard {
    * @throws IllegalArgumentException if it is less than 1
    */
   public Steelyard withThreads(int count) {
-    if (count < 1) {
-      throw new IllegalArgumentException("threads must be at least 1, found " + count);
-    }
-    return new Steelyard(tasks, fromThisJvm, count, isTimed);
+    return new Steelyard(bench.withThreads(count));
   }
 
   /** Returns one that measures errors alone. */
   public Steelyard withoutTiming() {
-    return new Steelyard(tasks, fromThisJvm, threads, false);
+    return new Steelyard(bench.untimed());
+  }
+
+  /** Returns one that says how far it has come. */
+  public Steelyard withProgress(Progress progress) {
+    return new Steelyard(bench.reporting(progress));
+  }
+
+  /** Returns one that tries code by its name in this JVM, which is quicker, and at its mercy. */
+  public Steelyard inThisJvm() {
+    return new Steelyard(bench.isolated(Bringing.Isolation.SAME_JVM));
   }
 
   /** Returns the ids of the tasks. */
   public List<String> tasks() {
-    return tasks.stream().<String>map(Task::id).toList();
+    return bench.tasks().stream().<String>map(Task::id).toList();
   }
 
   /** Returns the ids of a task's families. */
   public List<String> families(String task) {
-    return new Workbench(tasks)
-        .task(task).families().stream().map(family -> family.profile().id()).toList();
+    return workbench().task(task).families().stream().map(each -> each.profile().id()).toList();
   }
 
   /** Returns the ids of a task's candidates, the textbook one first. */
   public List<String> candidates(String task) {
-    return ids(new Workbench(tasks).task(task));
+    return bench.candidates(workbench().task(task));
+  }
+
+  /** Returns a plan to adjust: the name of a built-in one, or the path of a file. */
+  public Plan plan(String nameOrFile) {
+    return bench.extended(bench.reader().find(nameOrFile));
+  }
+
+  /**
+   * Returns a plan to adjust.
+   *
+   * @param toml its text; jars and data files that it names are looked for in the working folder
+   */
+  public Plan planOf(String toml) {
+    return bench.extended(bench.reader().read("plan", toml));
   }
 
   /** Executes a plan: the name of a built-in one, or the path of a file. */
   public Run run(String plan) {
-    return execute(reader().find(plan));
+    return run(plan(plan));
   }
 
   /**
@@ -153,7 +145,16 @@ public final class Steelyard {
    * @param toml its text; jars and data files that it names are looked for in the working folder
    */
   public Run runText(String toml) {
-    return execute(reader().read("plan", toml));
+    return run(planOf(toml));
+  }
+
+  /**
+   * Executes a plan.
+   *
+   * @param plan a plan of this very object, since it names the candidates that were added
+   */
+  public Run run(Plan plan) {
+    return new Weighings(bench).run(plan);
   }
 
   /**
@@ -164,18 +165,22 @@ public final class Steelyard {
    * @param columns the columns of a table, by name or by number from 1; empty where there is one
    */
   public Run weigh(String task, List<Path> files, List<String> columns) {
-    return weigh(new Workbench(tasks).task(task), new DataFiles(files, columns));
+    return new Weighings(bench).weigh(task, new OwnData.InFiles(new DataFiles(files, columns)));
   }
 
-  private <K, D extends Data> Run weigh(Task<K, D> task, DataFiles files) {
-    OwnFamily<D> family = OwnFamily.read(task, files);
-    Plan plan = new FileWeighing(ids(task), List.of(), isTimed, TIMEOUT_MS).plan(task, family);
-    return execute(plan, List.of(task.withFamilies(List.of(family))));
+  /**
+   * Weighs every candidate of a task on one problem in memory.
+   *
+   * @param task the id of the task
+   * @param data the input, such as {@code Terms} for {@code sum}
+   */
+  public Run weigh(String task, Data data) {
+    return new Weighings(bench).weigh(task, new OwnData.InArrays(data.parts()));
   }
 
   /** Makes the problem with this id, which can judge any answer. */
   public Problem<?> problem(String id) {
-    return new Workbench(tasks).problem(ProblemId.parse(id));
+    return workbench().problem(ProblemId.parse(id));
   }
 
   /**
@@ -206,49 +211,17 @@ public final class Steelyard {
     RunFolder.write(folder, run, RunFolder.Existing.KEEP);
   }
 
+  /** Writes a run to a folder, in place of the run that is there, if there is one. */
+  public static void replace(Run run, Path folder) {
+    RunFolder.write(folder, run, RunFolder.Existing.REPLACE);
+  }
+
   /** Reads a run back. */
   public static Run read(Path folder) {
     return RunFolder.read(folder);
   }
 
-  private PlanReader reader() {
-    return new PlanReader(Catalogue.of(tasks), Bringing::expanded);
-  }
-
-  private Run execute(Plan plan) {
-    return execute(plan, tasks);
-  }
-
-  private Run execute(Plan wanted, List<Task<?, ?>> weighed) {
-    Plan plan = isTimed ? wanted : wanted.withoutTiming();
-    Instant started = Instant.now();
-    try (Bringing bringing =
-        new Bringing(weighed, plan.additions(), Bringing.Isolation.OWN_JVM, threads)) {
-      Stopwatch jmh = new JmhStopwatch(PATIENCE, plan.additions());
-      Execution execution =
-          new PlanExecution(
-                  bringing.tasks(),
-                  (task, candidate, data, effort) -> {
-                    if (fromThisJvm.contains(task + ":" + candidate)) {
-                      throw new TimingException("not timed: it is known to one JVM alone", null);
-                    }
-                    return jmh.measure(task, candidate, data, effort);
-                  },
-                  threads,
-                  Progress.SILENT,
-                  new Interruption())
-              .execute(plan);
-      return Run.of(
-          execution.observations(),
-          execution.timings(),
-          plan.toToml(),
-          RunRecord.of(plan, execution, started, Instant.now()));
-    } catch (IOException failed) {
-      throw new UncheckedIOException(failed);
-    }
-  }
-
-  private static List<String> ids(Task<?, ?> task) {
-    return task.candidates().stream().<String>map(Candidate::id).toList();
+  private Workbench workbench() {
+    return new Workbench(bench.tasks());
   }
 }

@@ -15,6 +15,7 @@ import picocli.CommandLine.Parameters;
 import steelyard.harness.bring.Bringing;
 import steelyard.harness.execution.Execution;
 import steelyard.harness.execution.PlanExecution;
+import steelyard.harness.execution.PlanFindings;
 import steelyard.harness.execution.RunRecord;
 import steelyard.harness.plan.Addition;
 import steelyard.harness.plan.Catalogue;

@@ -16,6 +16,7 @@ import steelyard.harness.bring.Bringing;
 import steelyard.harness.execution.Execution;
 import steelyard.harness.execution.FileWeighing;
 import steelyard.harness.execution.PlanExecution;
+import steelyard.harness.execution.PlanFindings;
 import steelyard.harness.execution.Workbench;
 import steelyard.harness.input.DataFiles;
 import steelyard.harness.input.OwnFamily;

@@ -2,17 +2,17 @@ package steelyard.harness.execution;
 
 import java.util.List;
 import java.util.Optional;
-import steelyard.harness.input.OwnFamily;
 import steelyard.harness.plan.Addition;
 import steelyard.harness.plan.FamilyShare;
 import steelyard.harness.plan.Plan;
 import steelyard.harness.plan.TimingEffort;
 import steelyard.harness.plan.Weighing;
 import steelyard.harness.task.Task;
+import steelyard.problems.Family;
 import steelyard.problems.ProblemId;
 
 /**
- * How the one problem from a user's files is weighed.
+ * How the one problem that a user brings along is weighed.
  *
  * @param candidates the ids of the candidates
  * @param additions those that come from outside
@@ -29,13 +29,13 @@ public record FileWeighing(
     additions = List.copyOf(additions);
   }
 
-  /** Returns the plan for a problem of a task. */
-  public Plan plan(Task<?, ?> task, OwnFamily<?> family) {
+  /** Returns the plan for the one problem that a family makes. */
+  public Plan plan(Task<?, ?> task, Family<?> family) {
     String name = family.profile().id();
     Weighing weighing =
         new Weighing(
             task.id(),
-            List.of(new FamilyShare(name, List.of(), List.of(family.size()))),
+            List.of(new FamilyShare(name, List.of(), List.of(family.reach().minSize()))),
             candidates,
             1,
             Optional.of(name),

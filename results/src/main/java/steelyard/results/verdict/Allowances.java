@@ -23,6 +23,14 @@ public final class Allowances {
     return D_FACTOR * Math.sqrt(size);
   }
 
+  /** Returns which share of a limit an error is: at most 1 exactly where the error is within it. */
+  static double share(double error, double limit) {
+    if (error <= limit) {
+      return Double.isInfinite(limit) ? 0 : Math.min(1, error / limit);
+    }
+    return Math.max(Math.nextUp(1.0), error / limit);
+  }
+
   /** Returns the unit roundoff u = 2⁻ᵖ of a precision of p bits: 2⁻⁵³ for binary64. */
   public static double unitRoundoff(int precisionBits) {
     return Math.scalb(1.0, -precisionBits);

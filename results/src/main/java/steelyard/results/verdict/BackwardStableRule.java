@@ -1,7 +1,5 @@
 package steelyard.results.verdict;
 
-import java.util.List;
-import java.util.OptionalDouble;
 import steelyard.results.Grade;
 import steelyard.results.Observation;
 
@@ -16,13 +14,8 @@ record BackwardStableRule() implements VerdictRule {
   }
 
   @Override
-  public boolean holds(List<Observation> judged) {
-    return judged.stream().allMatch(BackwardStableRule::holds);
-  }
-
-  private static boolean holds(Observation o) {
-    OptionalDouble error = o.backwardError();
+  public double used(Observation o) {
     double limit = Allowances.c(o.size()) * Allowances.unitRoundoff(o.precisionBits());
-    return error.isPresent() && error.getAsDouble() <= limit;
+    return Allowances.share(o.backwardError().orElse(Double.POSITIVE_INFINITY), limit);
   }
 }

@@ -1,6 +1,5 @@
 package steelyard.results.verdict;
 
-import java.util.List;
 import steelyard.results.Grade;
 import steelyard.results.Observation;
 
@@ -15,16 +14,11 @@ record ForwardStableRule() implements VerdictRule {
   }
 
   @Override
-  public boolean holds(List<Observation> judged) {
-    return judged.stream().allMatch(ForwardStableRule::holds);
-  }
-
-  /** Says whether one judged observation is within the limit. */
-  static boolean holds(Observation o) {
+  public double used(Observation o) {
     double limit =
         Allowances.c(o.size())
             * Math.max(o.condition().orElseThrow(), 1)
             * Allowances.unitRoundoff(o.precisionBits());
-    return o.forwardError().orElseThrow() <= limit;
+    return Allowances.share(o.forwardError().orElseThrow(), limit);
   }
 }

@@ -2,6 +2,7 @@ package steelyard.results.verdict;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import java.util.Set;
 import steelyard.results.Grade;
 import steelyard.results.Observation;
@@ -24,6 +25,11 @@ final class Grader {
     rules.add(new BackwardStableRule());
     rules.add(new ForwardStableRule());
     return List.copyOf(rules);
+  }
+
+  /** Returns the rule of a grade, if it is one that a candidate can earn. */
+  static Optional<VerdictRule> rule(Grade grade) {
+    return BEST_FIRST.stream().filter(rule -> rule.grade() == grade).findFirst();
   }
 
   /** Grades any observations of one candidate. */

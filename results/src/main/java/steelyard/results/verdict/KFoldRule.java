@@ -24,18 +24,18 @@ record KFoldRule(int k) implements VerdictRule {
   }
 
   @Override
-  public boolean holds(List<Observation> judged) {
-    return judged.stream().anyMatch(this::isEvidence)
-        && judged.stream().allMatch(this::withinLimit);
+  public boolean isEvidence(List<Observation> judged) {
+    return judged.stream().anyMatch(this::isEvidence);
   }
 
   private boolean isEvidence(Observation o) {
     return loss(o, k - 1) >= 1 && loss(o, k) <= LITTLE;
   }
 
-  private boolean withinLimit(Observation o) {
+  @Override
+  public double used(Observation o) {
     double u = Allowances.unitRoundoff(o.precisionBits());
-    return o.forwardError().orElseThrow() <= 2 * u + loss(o, k);
+    return Allowances.share(o.forwardError().orElseThrow(), 2 * u + loss(o, k));
   }
 
   /** Returns (D(n)u)ʲκ: what may be lost of an answer that was computed in j-fold precision. */

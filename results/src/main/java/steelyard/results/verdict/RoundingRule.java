@@ -1,7 +1,6 @@
 package steelyard.results.verdict;
 
 import java.util.List;
-import java.util.Optional;
 import java.util.Set;
 import steelyard.results.Grade;
 import steelyard.results.Observation;
@@ -15,12 +14,12 @@ record RoundingRule(Grade grade, Set<Rounding> allowed) implements VerdictRule {
   static final int LEAST_PROBLEMS = 20;
 
   @Override
-  public boolean holds(List<Observation> judged) {
-    return judged.stream().map(Observation::problem).distinct().count() >= LEAST_PROBLEMS
-        && judged.stream().map(Observation::rounding).allMatch(this::allows);
+  public boolean isEvidence(List<Observation> judged) {
+    return judged.stream().map(Observation::problem).distinct().count() >= LEAST_PROBLEMS;
   }
 
-  private boolean allows(Optional<Rounding> rounding) {
-    return rounding.isPresent() && allowed.contains(rounding.get());
+  @Override
+  public double used(Observation o) {
+    return o.rounding().filter(allowed::contains).isPresent() ? 0 : Double.POSITIVE_INFINITY;
   }
 }

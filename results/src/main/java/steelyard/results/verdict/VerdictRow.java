@@ -138,7 +138,7 @@ final class VerdictRow {
   private static Optional<Observation> failsFrom(List<Observation> rows) {
     return rows.stream()
         .filter(Observation::isJudged)
-        .filter(o -> !ForwardStableRule.holds(o))
+        .filter(o -> new ForwardStableRule().used(o) > 1)
         .min(Comparator.comparingDouble(o -> o.condition().orElseThrow()));
   }
 

@@ -1,4 +1,4 @@
-package steelyard.harness.cli;
+package steelyard.harness.execution;
 
 import java.util.ArrayList;
 import java.util.List;
@@ -13,10 +13,18 @@ import steelyard.results.verdict.BrokenBound;
 /**
  * What in a run asks for somebody's attention, a line each: claimed bounds that were broken, and
  * requirements of the plan that no candidate meets.
+ *
+ * @param lines the lines
  */
-record PlanFindings(List<String> lines) {
+public record PlanFindings(List<String> lines) {
 
-  static PlanFindings of(Plan plan, Run run) {
+  /** Copies the list. */
+  public PlanFindings {
+    lines = List.copyOf(lines);
+  }
+
+  /** Returns what is to be said of a run. */
+  public static PlanFindings of(Plan plan, Run run) {
     List<String> lines = new ArrayList<>(brokenBounds(run.observations()));
     for (Requirement requirement : plan.requirements()) {
       Choice choice = choice(requirement, run);
@@ -28,10 +36,11 @@ record PlanFindings(List<String> lines) {
                 + requirement.size());
       }
     }
-    return new PlanFindings(List.copyOf(lines));
+    return new PlanFindings(lines);
   }
 
-  static List<String> brokenBounds(List<Observation> observations) {
+  /** Returns a line for each claimed bound that an observation breaks. */
+  public static List<String> brokenBounds(List<Observation> observations) {
     return BrokenBound.in(observations).stream()
         .map(
             broken ->
