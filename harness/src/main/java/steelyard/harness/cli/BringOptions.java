@@ -71,14 +71,20 @@ final class BringOptions {
     }
     String use = parts.group(3).strip();
     List<String> own = new ArrayList<>();
-    int at = use.indexOf('@');
-    if (at >= 0 && !OTHER_LANGUAGE.matcher(use).matches()) {
-      own.addAll(Arrays.asList(use.substring(at + 1).split(Pattern.quote(File.pathSeparator), -1)));
-      use = use.substring(0, at).strip();
+    if (!OTHER_LANGUAGE.matcher(use).matches()) {
+      int at = use.indexOf('@');
+      if (at >= 0) {
+        String path = use.substring(at + 1);
+        own.addAll(Arrays.asList(path.split(Pattern.quote(File.pathSeparator), -1)));
+        use = use.substring(0, at).strip();
+      }
+      own.addAll(jars);
     }
-    own.addAll(jars);
     return new Addition(
-        parts.group(1).strip(), id, use, own.stream().map(BringOptions::absolute).toList());
+        parts.group(1).strip(),
+        id,
+        use,
+        own.stream().map(BringOptions::absolute).distinct().toList());
   }
 
   private static String absolute(String jar) {
