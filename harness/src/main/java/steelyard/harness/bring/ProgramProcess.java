@@ -8,6 +8,7 @@ import java.io.Writer;
 import java.nio.charset.StandardCharsets;
 import java.util.List;
 import java.util.Optional;
+import java.util.OptionalLong;
 import java.util.concurrent.ArrayBlockingQueue;
 import java.util.concurrent.BlockingQueue;
 import java.util.concurrent.LinkedBlockingQueue;
@@ -25,22 +26,26 @@ final class ProgramProcess implements Servant {
   private static final int LINES_AHEAD = 1024;
   private static final long LAST_BREATH_MS = 2000;
   private static final long LAST_WORDS_MS = 300;
+  private static final long FAREWELL_MS = 500;
+  private static final String END_OF_INPUT = "";
 
   private final Process process;
   private final BlockingQueue<String> requests = new LinkedBlockingQueue<>();
 
   // Empty stands for the end of the stream.
   private final BlockingQueue<Optional<String>> lines = new ArrayBlockingQueue<>(LINES_AHEAD);
+  private final Thread reader;
   private final Thread complaints;
   private volatile String lastComplaint = "";
   private boolean ready;
   private volatile boolean closed;
+  private OptionalLong leaveBy = OptionalLong.empty();
   private long problems;
 
   private ProgramProcess(Process process) {
     this.process = process;
     thread("steelyard-program-input", this::write);
-    thread("steelyard-program-output", this::read);
+    reader = thread("steelyard-program-output", this::read);
     complaints = thread("steelyard-program-errors", this::listen);
     thread("steelyard-program-end", this::watch);
   }
@@ -52,7 +57,10 @@ final class ProgramProcess implements Servant {
    */
   static ProgramProcess start(String task, List<String> command) {
     try {
-      ProgramProcess started = new ProgramProcess(new ProcessBuilder(command).start());
+      ProcessBuilder builder = new ProcessBuilder(command);
+      // A user's decimal comma would garble a good answer.
+      builder.environment().put("LC_ALL", "C");
+      ProgramProcess started = new ProgramProcess(builder.start());
       started.requests.add(ProgramText.greeting(task));
       return started;
     } catch (IOException failed) {
@@ -102,9 +110,24 @@ final class ProgramProcess implements Servant {
   }
 
   @Override
+  public void askToLeave() {
+    leaveBy = OptionalLong.of(System.nanoTime() + TimeUnit.MILLISECONDS.toNanos(FAREWELL_MS));
+    requests.add(END_OF_INPUT);
+  }
+
+  @Override
   public void close() {
     closed = true;
+    if (leaveBy.isPresent()) {
+      try {
+        process.waitFor(leaveBy.getAsLong() - System.nanoTime(), TimeUnit.NANOSECONDS);
+      } catch (InterruptedException impatient) {
+        Thread.currentThread().interrupt();
+      }
+    }
     ProcessTree.end(process);
+    // It may wait for somebody to take what a flood left.
+    reader.interrupt();
   }
 
   private Mishap garbled(String what) {
@@ -146,6 +169,9 @@ final class ProgramProcess implements Servant {
             new OutputStreamWriter(process.getOutputStream(), StandardCharsets.US_ASCII))) {
       while (process.isAlive()) {
         String request = requests.poll(LAST_BREATH_MS, TimeUnit.MILLISECONDS);
+        if (END_OF_INPUT.equals(request)) {
+          return;
+        }
         if (request != null) {
           out.write(request);
           out.flush();
@@ -167,7 +193,7 @@ final class ProgramProcess implements Servant {
       lines.put(Optional.empty());
     } catch (IOException gone) {
       lines.offer(Optional.empty());
-    } catch (InterruptedException never) {
+    } catch (InterruptedException closing) {
       Thread.currentThread().interrupt();
     }
   }

@@ -84,8 +84,7 @@ final class ProgramText {
     }
     Matcher answer = ANSWER.matcher(line.strip());
     if (!answer.matches()) {
-      throw new GarbledException(
-          "it says '" + quoted(line) + "', not 'answer " + problem + " COUNT'");
+      throw new GarbledException("it says '" + quoted(line) + "', not 'answer' and two numbers");
     }
     requireNumber(answer.group(1), problem);
     int count = Integer.parseInt(answer.group(2));
@@ -95,9 +94,10 @@ final class ProgramText {
     return new Header(count, Optional.empty());
   }
 
+  // The numbers are not named: they depend on which thread asked what before.
   private static void requireNumber(String number, long problem) throws GarbledException {
     if (Long.parseLong(number) != problem) {
-      throw new GarbledException("it answers problem " + number + ", and was asked " + problem);
+      throw new GarbledException("it answers another problem than the one that it was given");
     }
   }
 

@@ -27,7 +27,10 @@ interface Servant extends AutoCloseable {
   /** Says whether it can go on. */
   boolean isUsable();
 
-  /** Ends the process and whatever it started. */
+  /** Tells a process that waits for a problem that there will be none; does not wait. */
+  default void askToLeave() {}
+
+  /** Ends the process and whatever it started; one that was asked to leave has a moment for it. */
   @Override
   void close();
 }

@@ -79,6 +79,7 @@ final class ServantPool implements Function<List<Data.Part>, double[]>, AutoClos
         return process;
       }
       all.remove(process);
+      experienced.remove(process);
     }
     return started();
   }
@@ -105,8 +106,10 @@ final class ServantPool implements Function<List<Data.Part>, double[]>, AutoClos
   @Override
   public synchronized void close() {
     closed = true;
+    idle.forEach(Servant::askToLeave);
     all.forEach(Servant::close);
     all.clear();
     idle.clear();
+    experienced.clear();
   }
 }

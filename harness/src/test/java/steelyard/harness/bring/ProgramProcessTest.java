@@ -98,9 +98,9 @@ class ProgramProcessTest {
         "MALFORMED | echo hello | the program does not keep to the protocol: it says 'hello', not"
             + " 'steelyard 1'",
         "MALFORMED | echo steelyard 1; echo 3.5 | the program does not keep to the protocol: it says"
-            + " '3.5', not 'answer 1 COUNT'",
+            + " '3.5', not 'answer' and two numbers",
         "MALFORMED | echo steelyard 1; echo answer 7 1 | the program does not keep to the protocol:"
-            + " it answers problem 7, and was asked 1",
+            + " it answers another problem than the one that it was given",
         "MALFORMED | echo steelyard 1; echo answer 1 1; echo 1 2 | the program does not keep to the"
             + " protocol: more numbers than the 1 it announced",
         "MALFORMED | echo steelyard 1; echo answer 1 1; echo 1,5 | the program does not keep to the"
@@ -155,6 +155,61 @@ class ProgramProcessTest {
     for (ProcessHandle each : started()) {
       each.onExit().get(5, TimeUnit.SECONDS);
     }
+  }
+
+  @Test
+  void aProgramThatFloodsItsOutputLeavesNoThreadBehind() throws Exception {
+    pool = pool(script("echo steelyard 1; yes"));
+    for (int i = 0; i < 5; i++) {
+      assertMishap(
+          Status.MALFORMED,
+          "the program does not keep to the protocol: it says 'y', not 'answer' and two numbers",
+          1);
+    }
+    for (Thread each : threadsOfPrograms()) {
+      each.join(5000);
+      assertThat(each.isAlive()).as(each.getName()).isFalse();
+    }
+  }
+
+  @Test
+  void whatIsWrongIsSaidAlikeOfEveryProblem() throws IOException {
+    String script = "n=0; while read line; do [ \"$line\" = end ] || continue; n=$((n+1)); ";
+    pool = pool(script("echo steelyard 1; " + script + "echo error $n dry; done"));
+    assertMishap(Status.EXCEPTION, "dry", 1);
+    assertMishap(Status.EXCEPTION, "dry", 2);
+    pool.close();
+    pool =
+        pool(script("echo steelyard 1; " + script + "echo error $n dry; [ $n = 2 ] && echo; done"));
+    assertMishap(Status.EXCEPTION, "dry", 1);
+    assertMishap(Status.EXCEPTION, "dry", 2);
+    assertMishap(
+        Status.MALFORMED,
+        "the program does not keep to the protocol: it says '', not 'answer' and two numbers",
+        3);
+  }
+
+  @Test
+  void closingLetsAProgramLeaveByItself() throws IOException {
+    Path farewell = folder.resolve("farewell");
+    pool =
+        pool(script("echo steelyard 1; echo answer 1 1; echo 2; cat >/dev/null; : >" + farewell));
+    assertThat(pool.apply(terms(1))).containsExactly(2);
+    pool.close();
+    assertThat(farewell).exists();
+  }
+
+  @Test
+  void theLocaleOfTheUserDoesNotReachAProgram() throws IOException {
+    pool =
+        pool(script("echo steelyard 1; echo answer 1 1; [ \"$LC_ALL\" = C ] && echo 1 || echo 0"));
+    assertThat(pool.apply(terms(1))).containsExactly(1);
+  }
+
+  private static List<Thread> threadsOfPrograms() {
+    return Thread.getAllStackTraces().keySet().stream()
+        .filter(each -> each.getName().startsWith("steelyard-program"))
+        .toList();
   }
 
   private List<ProcessHandle> started() {
