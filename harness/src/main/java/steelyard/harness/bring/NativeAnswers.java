@@ -8,6 +8,7 @@ import java.lang.reflect.InvocationTargetException;
 import java.lang.reflect.Method;
 import java.nio.file.Path;
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.List;
 import java.util.function.Function;
 import steelyard.problems.Data;
@@ -127,6 +128,8 @@ final class NativeAnswers implements Function<List<Data.Part>, double[]> {
     int n = count(parts);
     double[] answer = new double[isScalar ? 1 : n];
     if (!isScalar) {
+      // What the function leaves out must not look like an answer.
+      Arrays.fill(answer, Double.NaN);
       arguments.add(answer);
     }
     if (isLong) {

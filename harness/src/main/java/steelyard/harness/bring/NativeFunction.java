@@ -21,6 +21,10 @@ record NativeFunction(Path library, String name, boolean isLong) {
   private static final String PREFIX = "native:";
   private static final Pattern TEXT =
       Pattern.compile("(.+)!\\s*([A-Za-z_][A-Za-z_0-9]*)\\s*\\(([^()]*)\\)");
+  private static final Pattern ARRAY =
+      Pattern.compile("double\\s*(\\*\\s*\\w*|\\s\\w+\\s*\\[\\]|\\[\\])");
+  private static final Pattern COUNT =
+      Pattern.compile("(long|int)(\\s+(?!int\\b|long\\b|double\\b)\\w+)?");
   private static final int FIRST_JDK = 22;
 
   /** Says whether a use is a function in a shared library. */
@@ -66,8 +70,14 @@ record NativeFunction(Path library, String name, boolean isLong) {
         library(matcher.group(1).strip()), matcher.group(2), last.equals("long"));
   }
 
-  private static String canonical(String type) {
-    return type.replace("const ", " ").replaceAll("\\s+", "").replaceAll("\\[\\]$", "*");
+  /** Returns the type of a parameter, which may have a name, as in a header of C. */
+  private static String canonical(String parameter) {
+    String plain = parameter.replaceAll("\\b(const|restrict)\\b", " ").strip();
+    if (ARRAY.matcher(plain).matches()) {
+      return "double*";
+    }
+    Matcher count = COUNT.matcher(plain);
+    return count.matches() ? count.group(1) : plain;
   }
 
   private static List<String> wanted(Signature signature, String count) {

@@ -13,6 +13,7 @@ import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
+import org.junit.jupiter.params.provider.ValueSource;
 import steelyard.algorithms.dot.DotProduct;
 import steelyard.algorithms.solve.LinearSolver;
 import steelyard.algorithms.sum.Summation;
@@ -35,6 +36,7 @@ class NativeFunctionTest {
         for (int i = 0; i < count; i++) sum += x[i] * y[i];
         return sum;
       }
+      void first(double *a, double *b, double *x, long count) { x[0] = b[0]; }
       void diagonal(double *a, double *b, double *x, long count) {
         for (long i = 0; i < count; i++) x[i] = b[i] / a[i * count + i];
       }
@@ -47,6 +49,12 @@ class NativeFunctionTest {
       delimiter = '|',
       value = {
         "sum | native: libx.so | must look like native: libfoo.so!foo_sum(double*, long)",
+        "sum | native: libx.so!f(double*, unsigned long) | function f does not fit",
+        "sum | native: libx.so!f(double*, long double) | function f does not fit",
+        "sum | native: libx.so!f(double**, long) | function f does not fit",
+        "sum | native: libx.so!f(double, long) | function f does not fit",
+        "sum | native: libx.so!f(long, double*) | function f does not fit",
+        "sum | native: libx.so!f() | function f does not fit",
         "sum | native: libx.so!f(float*, long) | function f does not fit: the task needs double"
             + " f(double*, long), the number of entries as long or int",
         "dot | native: libx.so!f(double*, int) | function f does not fit: the task needs double"
@@ -59,6 +67,38 @@ class NativeFunctionTest {
     assertThatThrownBy(() -> kernel(task, use))
         .isInstanceOf(BringException.class)
         .hasMessageContaining(sentence);
+  }
+
+  @ParameterizedTest
+  @ValueSource(
+      strings = {
+        "f(double*, long)",
+        "f( const double *terms , long n )",
+        "f(double const * restrict terms, const int n)",
+        "f(const double terms[], int)",
+        "f(double[], long count)"
+      })
+  void readsAFunctionAsItStandsInAHeader(String function) throws IOException {
+    Path library = Files.writeString(folder.resolve("libx.so"), "any");
+    String use = "native: " + library + "!" + function;
+    Signature sum = Signature.of(Summation.class);
+    if (Runtime.version().feature() < 22) {
+      // What does not fit is said before that.
+      assertThatThrownBy(() -> NativeFunction.parse(use, sum))
+          .hasMessageContaining("needs JDK 22 or newer");
+    } else {
+      assertThat(NativeFunction.parse(use, sum))
+          .isEqualTo(new NativeFunction(library, "f", function.contains("long")));
+    }
+  }
+
+  @Test
+  void whatAFunctionLeavesOutIsNoAnswer() throws Exception {
+    assumeTrue(Runtime.version().feature() >= 22);
+    String use = "native: " + library() + "!first(double*, double*, double*, long)";
+    LinearSolver first = (LinearSolver) kernel("solve", use);
+    assertThat(first.solve(new double[][] {{2, 9}, {9, 4}}, new double[] {1, 1}))
+        .containsExactly(1, Double.NaN);
   }
 
   @Test
