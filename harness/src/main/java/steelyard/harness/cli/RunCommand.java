@@ -89,9 +89,10 @@ final class RunCommand implements Callable<Integer> {
       }
     }
     Instant started = Instant.now();
-    try (Bringing bringing =
-            new Bringing(Tasks.all(), plan.additions(), bring.isolation(), workers);
-        InterruptWatch watch = new InterruptWatch()) {
+    // The watch is closed last: until then an interrupt waits for what candidates run in to end.
+    try (InterruptWatch watch = new InterruptWatch();
+        Bringing bringing =
+            new Bringing(Tasks.all(), plan.additions(), bring.isolation(), workers)) {
       RunFolder.prepare(folder, existing);
       Execution execution =
           new PlanExecution(

@@ -16,7 +16,7 @@ import steelyard.results.Observation;
 public final class AccuracyPhase {
 
   private static final long WATCH_MILLIS = 20;
-  private static final long LAST_BREATH_MILLIS = 100;
+  private static final long LAST_BREATH_MILLIS = 2000;
   private static final String NAME = "accuracy";
 
   private final int threads;
