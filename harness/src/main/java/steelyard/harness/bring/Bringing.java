@@ -107,33 +107,36 @@ public final class Bringing implements AutoCloseable {
   private <K, D extends Data> Candidate<K> candidate(Task<K, D> task, Addition addition) {
     Optional<ProgramCommand> command = ProgramCommand.find(addition.use());
     if (command.isPresent()) {
-      String source = "the program " + command.get().words().get(0);
-      K kernel =
-          task.kernel(
-              oneNumberIfScalar(
-                  task, pool(() -> ProgramProcess.start(addition.task(), command.get().words()))));
-      return Candidate.of(addition.id(), kernel, addition.use(), "not stated", source);
+      List<String> words = command.get().words();
+      Function<List<Data.Part>, double[]> pool =
+          pool(() -> ProgramProcess.start(addition.task(), words));
+      return candidate(
+          addition, task.kernel(oneNumberIfScalar(task, pool)), "the program " + words.get(0));
     }
     if (NativeFunction.isNative(addition.use())) {
       NativeFunction function =
           NativeFunction.parse(addition.use(), Signature.of(task.kernelType()));
-      K kernel =
-          isolation == Isolation.SAME_JVM
-              ? kernel(task, addition, false)
-              : task.kernel(pool(() -> CandidateProcess.start(addition)));
-      String source = "the shared library " + function.library().getFileName();
-      return Candidate.of(addition.id(), kernel, addition.use(), "not stated", source);
+      return candidate(
+          addition,
+          isolated(task, addition, () -> kernel(task, addition, false)),
+          "the shared library " + function.library().getFileName());
     }
     FoundCode code = found(task, addition);
-    return Candidate.of(
-            addition.id(),
-            isolation == Isolation.SAME_JVM
-                ? KernelMaker.make(task, code, false)
-                : task.kernel(pool(() -> CandidateProcess.start(addition))),
-            addition.use(),
-            "not stated",
+    return candidate(
+            addition,
+            isolated(task, addition, () -> KernelMaker.make(task, code, false)),
             addition.jars().isEmpty() ? "the class path" : String.join(", ", addition.jars()))
         .inPrecision(code.precisionBits());
+  }
+
+  private static <K> Candidate<K> candidate(Addition addition, K kernel, String source) {
+    return Candidate.of(addition.id(), kernel, addition.use(), "not stated", source);
+  }
+
+  private <K> K isolated(Task<K, ?> task, Addition addition, Supplier<K> here) {
+    return isolation == Isolation.SAME_JVM
+        ? here.get()
+        : task.kernel(pool(() -> CandidateProcess.start(addition)));
   }
 
   /** Says whether a candidate from outside can be timed: a program answers through pipes. */
@@ -183,13 +186,8 @@ public final class Bringing implements AutoCloseable {
   public static <K> K kernel(Task<K, ?> task, Addition addition, boolean keepsInput) {
     if (NativeFunction.isNative(addition.use())) {
       Signature signature = Signature.of(task.kernelType());
-      int arrays = signature.kernelMethod().getParameterCount() + (signature.isScalar() ? 0 : 1);
-      return task.kernel(
-          new NativeAnswers(
-              NativeFunction.parse(addition.use(), signature),
-              arrays,
-              signature.isScalar(),
-              keepsInput));
+      NativeFunction function = NativeFunction.parse(addition.use(), signature);
+      return task.kernel(new NativeAnswers(function, signature, keepsInput));
     }
     return KernelMaker.make(task, found(task, addition), keepsInput);
   }

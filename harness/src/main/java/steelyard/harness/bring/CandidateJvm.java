@@ -95,8 +95,7 @@ public final class CandidateJvm {
       double[] answer = task.apply(kernel, copy);
       return PartsCopy.sameBits(parts, copy.parts())
           ? Message.answer(answer)
-          : Message.mishap(
-              Message.Kind.MISHAP, Status.MODIFIED_INPUT, "the input differs after the call");
+          : Message.mishap(Message.Kind.MISHAP, Status.MODIFIED_INPUT, Attempt.MODIFIED);
     } catch (VirtualMachineError thrown) {
       return Message.mishap(Message.Kind.LAST_MISHAP, Status.EXCEPTION, Attempt.describe(thrown));
     } catch (Throwable thrown) {

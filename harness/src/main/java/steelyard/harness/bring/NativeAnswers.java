@@ -10,6 +10,7 @@ import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
+import java.util.Optional;
 import java.util.function.Function;
 import steelyard.problems.Data;
 
@@ -21,28 +22,28 @@ import steelyard.problems.Data;
  * @see <a href="https://openjdk.org/jeps/454">JEP 454: Foreign Function and Memory API</a>
  */
 final class NativeAnswers implements Function<List<Data.Part>, double[]> {
-  private final MethodHandle function;
+  private final SpreadMethod function;
   private final boolean isScalar;
   private final boolean isLong;
-  private final boolean isConstant;
 
   /**
    * Finds a function.
    *
-   * @param parameters how many arrays it takes, that of the answer included
+   * @param signature of the task's interface
+   * @param isTimed whether it is the one that this JVM times
    * @throws BringException if the library cannot be loaded, or has no such function
    */
-  NativeAnswers(NativeFunction wanted, int parameters, boolean isScalar, boolean timed) {
-    this.isScalar = isScalar;
+  NativeAnswers(NativeFunction wanted, Signature signature, boolean isTimed) {
+    isScalar = signature.isScalar();
     isLong = wanted.isLong();
+    int arrays = signature.kernelMethod().getParameterCount() + (isScalar ? 0 : 1);
     try {
-      function = spread(downcall(wanted, parameters, isScalar), parameters);
+      function = new SpreadMethod(downcall(wanted, arrays, isScalar), isTimed);
     } catch (InvocationTargetException thrown) {
       throw failed(wanted, thrown.getCause());
     } catch (ReflectiveOperationException impossible) {
       throw failed(wanted, impossible);
     }
-    isConstant = timed && ConstantMethod.set(function);
   }
 
   private static BringException failed(NativeFunction wanted, Throwable cause) {
@@ -73,8 +74,7 @@ final class NativeAnswers implements Function<List<Data.Part>, double[]> {
             .getMethod("libraryLookup", Path.class, arenaType)
             .invoke(null, wanted.library(), arena);
     Object symbol =
-        ((java.util.Optional<?>)
-                lookupType.getMethod("find", String.class).invoke(lookup, wanted.name()))
+        ((Optional<?>) lookupType.getMethod("find", String.class).invoke(lookup, wanted.name()))
             .orElseThrow(
                 () ->
                     new BringException(
@@ -109,13 +109,6 @@ final class NativeAnswers implements Function<List<Data.Part>, double[]> {
     return handle;
   }
 
-  private static MethodHandle spread(MethodHandle handle, int parameters) {
-    return handle
-        .asType(handle.type().changeReturnType(Object.class))
-        .asSpreader(Object[].class, parameters + 1)
-        .asType(MethodType.methodType(Object.class, Object[].class));
-  }
-
   @Override
   public double[] apply(List<Data.Part> parts) {
     List<Object> arguments = new ArrayList<>();
@@ -137,22 +130,12 @@ final class NativeAnswers implements Function<List<Data.Part>, double[]> {
     } else {
       arguments.add(n);
     }
-    Object result = call(arguments.toArray());
+    Object result = function.call(arguments.toArray());
     if (isScalar) {
       answer[0] = (double) result;
     }
     writeBack(parts, arguments);
     return answer;
-  }
-
-  private Object call(Object[] arguments) {
-    try {
-      return isConstant ? ConstantMethod.call(arguments) : (Object) function.invokeExact(arguments);
-    } catch (RuntimeException | Error thrown) {
-      throw thrown;
-    } catch (Throwable impossible) {
-      throw new IllegalStateException(impossible);
-    }
   }
 
   private static int count(List<Data.Part> parts) {

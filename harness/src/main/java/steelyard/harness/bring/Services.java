@@ -8,6 +8,7 @@ import java.nio.charset.StandardCharsets;
 import java.util.ArrayList;
 import java.util.Collections;
 import java.util.List;
+import java.util.Locale;
 import steelyard.harness.plan.Addition;
 
 /** Finds the implementations of a task's interface that jars provide as services. */
@@ -66,6 +67,6 @@ final class Services {
         .substring(className.lastIndexOf('.') + 1)
         .replaceAll("(?<=[a-z0-9])(?=[A-Z])", "-")
         .replaceAll("[^A-Za-z0-9]+", "-")
-        .toLowerCase(java.util.Locale.ROOT);
+        .toLowerCase(Locale.ROOT);
   }
 }

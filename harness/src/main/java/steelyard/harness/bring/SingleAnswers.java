@@ -1,7 +1,6 @@
 package steelyard.harness.bring;
 
 import java.lang.invoke.MethodHandle;
-import java.lang.invoke.MethodType;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.function.Function;
@@ -12,21 +11,15 @@ import steelyard.problems.Data;
  * method writes to it is written back, so that it shows.
  */
 final class SingleAnswers implements Function<List<Data.Part>, double[]> {
-  private final MethodHandle method;
+  private final SpreadMethod method;
   private final boolean keepsInput;
-  private final boolean isConstant;
   private List<Object> kept = List.of();
   private Object[] rounded = {};
 
   /** Makes one of a method whose receiver, if any, is bound. */
   SingleAnswers(MethodHandle method, boolean keepsInput) {
-    this.method =
-        method
-            .asType(method.type().changeReturnType(Object.class))
-            .asSpreader(Object[].class, method.type().parameterCount())
-            .asType(MethodType.methodType(Object.class, Object[].class));
+    this.method = new SpreadMethod(method, keepsInput);
     this.keepsInput = keepsInput;
-    isConstant = keepsInput && ConstantMethod.set(this.method);
   }
 
   @Override
@@ -55,14 +48,7 @@ final class SingleAnswers implements Function<List<Data.Part>, double[]> {
   }
 
   private double[] call(Object[] arguments) {
-    Object answer;
-    try {
-      answer = isConstant ? ConstantMethod.call(arguments) : (Object) method.invokeExact(arguments);
-    } catch (RuntimeException | Error thrown) {
-      throw thrown;
-    } catch (Throwable checked) {
-      throw new CheckedException(checked);
-    }
+    Object answer = method.call(arguments);
     if (answer instanceof Float number) {
       return new double[] {number};
     }
@@ -124,15 +110,6 @@ final class SingleAnswers implements Function<List<Data.Part>, double[]> {
       if (Float.floatToRawIntBits((float) values[i]) != Float.floatToRawIntBits(after[i])) {
         values[i] = after[i];
       }
-    }
-  }
-
-  /** What a method threw that is not a runtime exception. */
-  private static final class CheckedException extends RuntimeException {
-    private static final long serialVersionUID = 1L;
-
-    CheckedException(Throwable thrown) {
-      super(thrown.getClass().getSimpleName() + ": " + thrown.getMessage(), thrown);
     }
   }
 }

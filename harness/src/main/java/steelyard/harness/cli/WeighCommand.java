@@ -23,6 +23,7 @@ import steelyard.harness.input.OwnFamily;
 import steelyard.harness.plan.Addition;
 import steelyard.harness.plan.Catalogue;
 import steelyard.harness.plan.Plan;
+import steelyard.harness.run.Interruption;
 import steelyard.harness.task.Task;
 import steelyard.harness.task.Tasks;
 import steelyard.harness.timing.JmhStopwatch;
@@ -97,13 +98,15 @@ final class WeighCommand implements Callable<Integer> {
     List<Addition> additions =
         bring.additions().stream().filter(each -> each.task().equals(taskId)).toList();
     Catalogue.of(Tasks.all()).with(additions);
-    try (Bringing bringing = new Bringing(Tasks.all(), additions, bring.isolation(), 1)) {
-      return weigh(new Workbench(bringing.tasks()).task(taskId), additions);
+    // The watch is closed last: until then an interrupt waits for what candidates run in to end.
+    try (InterruptWatch watch = new InterruptWatch();
+        Bringing bringing = new Bringing(Tasks.all(), additions, bring.isolation(), 1)) {
+      return weigh(new Workbench(bringing.tasks()).task(taskId), additions, watch.interruption());
     }
   }
 
-  private <K, D extends Data> int weigh(Task<K, D> task, List<Addition> additions)
-      throws IOException {
+  private <K, D extends Data> int weigh(
+      Task<K, D> task, List<Addition> additions, Interruption interruption) throws IOException {
     List<String> chosen = chosen(task);
     DataFiles source = new DataFiles(files, columns);
     OwnFamily<D> family = OwnFamily.read(task, source);
@@ -114,17 +117,15 @@ final class WeighCommand implements Callable<Integer> {
     output.flush();
     Plan plan = new FileWeighing(chosen, additions, !noTiming, timeoutMs).plan(task, family);
     PrintWriter err = spec.commandLine().getErr();
-    try (InterruptWatch watch = new InterruptWatch()) {
-      Execution execution =
-          new PlanExecution(
-                  List.of(task.withFamilies(List.of(family))),
-                  new JmhStopwatch(PATIENCE, additions),
-                  1,
-                  new ProgressReport(err, Screen.ofProcess().terminal(), System::currentTimeMillis),
-                  watch.interruption())
-              .execute(plan);
-      return report(execution, output, err);
-    }
+    Execution execution =
+        new PlanExecution(
+                List.of(task.withFamilies(List.of(family))),
+                new JmhStopwatch(PATIENCE, additions),
+                1,
+                new ProgressReport(err, Screen.ofProcess().terminal(), System::currentTimeMillis),
+                interruption)
+            .execute(plan);
+    return report(execution, output, err);
   }
 
   private static int report(Execution execution, PrintWriter output, PrintWriter err) {

@@ -18,9 +18,4 @@ public record Addition(String task, String id, String use, List<String> jars) {
   public Addition {
     jars = List.copyOf(jars);
   }
-
-  /** Returns what a reader is told of it. */
-  public String text() {
-    return jars.isEmpty() ? use : use + " in " + String.join(", ", jars);
-  }
 }

@@ -16,6 +16,9 @@ import steelyard.results.Status;
  */
 public record Attempt(Status status, String detail, double[] answer) {
 
+  /** What a table says of a candidate that changed its input. */
+  public static final String MODIFIED = "the input differs after the call";
+
   /**
    * Calls a candidate twice, each time on a copy of its own, and lets nothing that it throws
    * escape.
@@ -28,7 +31,7 @@ public record Attempt(Status status, String detail, double[] answer) {
     try {
       double[] first = task.apply(candidate.kernel(), copy);
       if (!PartsCopy.sameBits(data.parts(), copy.parts())) {
-        return new Attempt(Status.MODIFIED_INPUT, "the input differs after the call", null);
+        return new Attempt(Status.MODIFIED_INPUT, MODIFIED, null);
       }
       if (!candidate.dependsOnCores() && !sameBits(first, task.apply(candidate.kernel(), copy))) {
         return new Attempt(
